@@ -21,7 +21,7 @@ import java.util.function.Function;
  * outgoing to incoming darts; every strand belongs to one component; every connected piece with n crossings has n + 2
  * regions, so that it lies on the sphere (otherwise the code describes a virtual link).
  *
- * <p><b>Cost.</b> Ten ints a crossing, in arrays that a {@link LinkBatch} shares among its diagrams; accessors O(1).
+ * <p><b>Cost.</b> 25 bytes a crossing, in arrays that a {@link LinkBatch} shares among its diagrams; accessors O(1).
  */
 public final class LinkDiagram {
 
@@ -59,8 +59,13 @@ public final class LinkDiagram {
      * @param starts for each component, in order, an outgoing dart on its first edge, or -1 for one without crossings
      * @return the diagram
      * @throws NotADiagramException if these do not make a diagram on the sphere
+     * @throws IllegalArgumentException if there are not four mates for each sign
      */
     public static LinkDiagram of(int[] mates, byte[] signs, int[] starts) throws NotADiagramException {
+        if (mates.length != 4L * signs.length) {
+            throw new IllegalArgumentException(mates.length + " mates for " + signs.length
+                    + " crossings; give four for each");
+        }
         LinkBatch.Builder batch = new LinkBatch.Builder();
         batch.add(signs.length, mates, signs, starts.length, starts);
         return batch.build().link(0);
@@ -237,6 +242,7 @@ public final class LinkDiagram {
      *
      * @param which for each component whether it is turned round
      * @return the diagram with those components reversed
+     * @throws IllegalArgumentException unless there is one choice for each component
      */
     public LinkDiagram reversed(boolean[] which) {
         return Relabelling.reversed(this, which);
@@ -246,7 +252,9 @@ public final class LinkDiagram {
      * The diagram of some components, the others rubbed out. O(n).
      *
      * @param keep for each component whether it stays
-     * @return the sublink; its components are numbered in the order they had, and keep their orientation
+     * @return the sublink; its components are numbered in the order they had, and keep their orientation;
+     *         keeping none gives the empty diagram
+     * @throws IllegalArgumentException unless there is one choice for each component
      */
     public LinkDiagram sublink(boolean[] keep) {
         return Surgery.sublink(this, keep);

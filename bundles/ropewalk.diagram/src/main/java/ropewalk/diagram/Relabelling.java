@@ -19,6 +19,10 @@ final class Relabelling {
     }
 
     static LinkDiagram reversed(LinkDiagram d, boolean[] which) {
+        if (which.length != d.components()) {
+            throw new IllegalArgumentException(which.length + " choices for " + d.components()
+                    + " components; give one for each");
+        }
         int n = d.crossings();
         byte[] turns = new byte[n];
         byte[] signs = new byte[n];

@@ -10,6 +10,8 @@ import java.util.function.Supplier;
 public final class Notations {
 
     private static final Map<String, Supplier<CodeReader>> READERS = new TreeMap<>(Map.of(
+            "braid", BraidReader::new,
+            "dowker", DowkerReader::new,
             "planar", PlanarReader::new));
     private static final Map<String, CodeWriter> WRITERS = new TreeMap<>(Map.of(
             "planar", new PlanarWriter()));

@@ -105,7 +105,7 @@ final class PlanarReader implements CodeReader {
                 s.step();
                 break;
             }
-            expect(s, ',', "',' or ']' is expected after a label");
+            expect(s, ',', "',' or ']' is expected after a label, which is a whole number");
         }
         if (count == 4) {
             crossings++;
@@ -196,17 +196,30 @@ final class PlanarReader implements CodeReader {
         }
         for (int d = 0; d < darts; d++) {
             if (mates[d] == NONE) {
+                refuseCircleWith(labels[d]);
                 throw new CodeException(offsets[d], "label " + name(labels[d])
                         + " occurs once; every label occurs exactly twice, that of a component without crossings once");
             }
         }
         for (int i = 0; i < circles; i++) {
             if (first[circleLabels[i]] != NONE) {
-                throw new CodeException(circleOffsets[i], "label " + name(circleLabels[i])
-                        + " of a component without crossings is used elsewhere; give it a label of its own");
+                throw circleFault(i);
             }
             first[circleLabels[i]] = CIRCLE;
         }
+    }
+
+    private void refuseCircleWith(int label) throws CodeException {
+        for (int i = 0; i < circles; i++) {
+            if (circleLabels[i] == label) {
+                throw circleFault(i);
+            }
+        }
+    }
+
+    private CodeException circleFault(int circle) {
+        return new CodeException(circleOffsets[circle], "label " + name(circleLabels[circle])
+                + " of a component without crossings is used elsewhere; give it a label of its own");
     }
 
     /** Finds the components by smallest label, their direction, and with it the sign of every crossing. */

@@ -27,7 +27,7 @@ final class PlanarWriter implements CodeWriter {
                 e = d.next(e);
             } while (e != start);
         }
-        StringBuilder out = new StringBuilder(24 * d.crossings() + 16);
+        StringBuilder out = new StringBuilder(24 * Math.min(d.crossings(), 1 << 24) + 16);
         for (int c = 0; c < d.crossings(); c++) {
             out.append(",[").append(labels[4 * c]);
             for (int i = 1; i < 4; i++) {

@@ -1,5 +1,7 @@
 package ropewalk.diagram.notation;
 
+import java.nio.charset.StandardCharsets;
+
 /** Reads blanks and whole numbers out of the bytes of a code. */
 final class Scan {
 
@@ -45,23 +47,40 @@ final class Scan {
     }
 
     /**
-     * A whole number without sign; stands at a digit. Anything above the limit stops the reading there, however long
-     * the number goes on, so that no remainder of it can pass for a small one.
+     * A whole number without sign; stands at a digit. Anything above the limit is refused, however long the number
+     * goes on, so that no remainder of it can pass for a small one.
      */
     long number(long limit, String what) throws CodeException {
         int from = at;
+        long value = numberOrMore(limit, what);
+        if (value > limit) {
+            throw new CodeException(from, what + " above " + limit + "; the largest that is let pass is " + limit);
+        }
+        return value;
+    }
+
+    /**
+     * A whole number without sign; stands at a digit, which with all that follow it is read. Whatever is above the
+     * limit (at most 2^59) comes back as limit + 1.
+     */
+    long numberOrMore(long limit, String what) throws CodeException {
+        int from = at;
         long value = 0;
         while (at < end && isDigit(text[at])) {
-            value = 10 * value + (text[at] - '0');
-            if (value > limit) {
-                throw new CodeException(from, what + " above " + limit + "; the largest that is let pass is " + limit);
-            }
+            value = Math.min(limit + 1, 10 * value + (text[at] - '0'));
             at++;
         }
         if (text[from] == '0' && at > from + 1) {
             throw new CodeException(from, what + " with a leading 0; write it without");
         }
         return value;
+    }
+
+    /** What was read since an offset, cut after a score of bytes; digits and signs only. */
+    String since(int from) {
+        int to = Math.min(at, from + 20);
+        String read = new String(text, from, to - from, StandardCharsets.US_ASCII);
+        return to < at ? read + "…" : read;
     }
 
     /** What stands here, for a message. */

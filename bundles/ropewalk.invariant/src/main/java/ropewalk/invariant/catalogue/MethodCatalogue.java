@@ -3,7 +3,7 @@ package ropewalk.invariant.catalogue;
 import java.util.List;
 import org.osgi.annotation.versioning.ProviderType;
 
-/** The installed invariants and their methods. A service; what it returns is a snapshot. */
+/** The installed invariants and their methods. A service; thread-safe. */
 @ProviderType
 public interface MethodCatalogue {
 
@@ -11,7 +11,15 @@ public interface MethodCatalogue {
      * The invariants that are defined or measured by somebody: the standard ones in the order of the results table,
      * then the others by id.
      *
-     * @return the entries
+     * @return the entries as they are now
      */
     List<CatalogueEntry> entries();
+
+    /**
+     * Whether a method is still there.
+     *
+     * @param method a method that was listed before
+     * @return false once its bundle was stopped or removed
+     */
+    boolean isInstalled(RankedMethod method);
 }

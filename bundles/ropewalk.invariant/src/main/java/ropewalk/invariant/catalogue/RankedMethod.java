@@ -1,6 +1,9 @@
 package ropewalk.invariant.catalogue;
 
+import ropewalk.diagram.LinkDiagram;
+import ropewalk.invariant.Effort;
 import ropewalk.invariant.Method;
+import ropewalk.invariant.Outcome;
 
 /**
  * A method as it is installed.
@@ -23,5 +26,40 @@ public record RankedMethod(String id, String invariant, Method<?> method, int ra
      */
     public String origin() {
         return bundle + " " + version;
+    }
+
+    /**
+     * Measures one link and keeps whatever goes wrong inside this outcome.
+     *
+     * @param link any diagram
+     * @param effort for this link; {@link Effort.SpentException} is let through
+     * @return what the method says, or {@code Failed} where it throws
+     */
+    public Outcome<?> measure(LinkDiagram link, Effort effort) {
+        Thread thread = Thread.currentThread();
+        ClassLoader before = thread.getContextClassLoader();
+        thread.setContextClassLoader(loader);
+        try {
+            Outcome<?> outcome = method.measure(link, effort);
+            return outcome == null ? new Outcome.Failed<>("returned null") : outcome;
+        } catch (Effort.SpentException e) {
+            throw e;
+        } catch (RuntimeException | StackOverflowError | OutOfMemoryError | LinkageError | AssertionError e) {
+            return failed(e);
+        } finally {
+            thread.setContextClassLoader(before);
+        }
+    }
+
+    /**
+     * The outcome of a method that threw.
+     *
+     * @param thrown what it threw
+     * @return the failure, on one line
+     */
+    public static Outcome<?> failed(Throwable thrown) {
+        String message = thrown.getMessage();
+        String text = thrown.getClass().getSimpleName() + (message == null ? "" : ": " + message);
+        return new Outcome.Failed<>(text.replaceAll("\\p{Cntrl}+", " "));
     }
 }

@@ -32,6 +32,11 @@ public final class CatalogueComponent implements MethodCatalogue {
         return ordering.entries(methods.values(), definitions.values());
     }
 
+    @Override
+    public boolean isInstalled(RankedMethod method) {
+        return methods.containsValue(method);
+    }
+
     @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)
     void addMethod(ServiceReference<Method<?>> reference, Method<?> method) {
         String id = text(reference, Method.ID);

@@ -1,0 +1,175 @@
+package ropewalk.algebra.internal;
+
+import java.util.Arrays;
+
+/**
+ * Turns a recording into a program: sorts the pivots by level of the elimination tree (R. Schreiber, ACM TOMS 8 (1982)
+ * 256–276) and gives every place a slot for the time between its first and its last use. Linear in the recording.
+ */
+final class Compiler {
+    private final Recording recording;
+    private final int[] in;
+    private final int[] slotOf;
+    private final IntList free = new IntList(256);
+    private final IntList out;
+    private int slots;
+
+    private Compiler(Recording recording, int places) {
+        this.recording = recording;
+        this.in = recording.code();
+        this.out = new IntList(in.length + in.length / 4);
+        this.slotOf = new int[places];
+        Arrays.fill(slotOf, -1);
+    }
+
+    /**
+     * Compiles.
+     *
+     * @param recording the steps
+     * @param places the number of places
+     * @param initial the values of the first places
+     * @param rest the places left at the end
+     */
+    static Program compile(Recording recording, int places, long[] initial, int[] rest) {
+        return new Compiler(recording, places).compile(places, initial, rest);
+    }
+
+    private Program compile(int places, long[] initial, int[] rest) {
+        int steps = recording.steps();
+        int[] level = new int[steps];
+        int levels = levels(level, places);
+        int[] start = new int[levels + 1];
+        for (int s = 0; s < steps; s++) {
+            start[level[s] + 1]++;
+        }
+        int widest = 0;
+        for (int k = 0; k < levels; k++) {
+            widest = Math.max(widest, start[k + 1]);
+            start[k + 1] += start[k];
+        }
+        int[] next = start.clone();
+        int[] order = new int[steps];
+        for (int s = 0; s < steps; s++) {
+            order[next[level[s]]++] = s;
+        }
+        for (int k = 0; k < levels; k++) {
+            header(order, start[k], start[k + 1]);
+            for (int s = start[k]; s < start[k + 1]; s++) {
+                body(order[s]);
+            }
+        }
+        int[] code = out.toArray();
+        out.clear();
+        load(rest, 0, rest.length);
+        for (int place : rest) {
+            out.add(slotOf[place]);
+        }
+        return new Program(code, levels, widest, slots, initial, out.toArray(), rest.length);
+    }
+
+    /** A step reads its pivot and the places beside it: it comes after all steps that changed one of them. */
+    private int levels(int[] level, int places) {
+        int[] changed = new int[places];
+        int levels = 0;
+        for (int s = 0; s < level.length; s++) {
+            int at = readFrom(s);
+            int end = targetsFrom(s);
+            int mine = 0;
+            for (int k = recording.start(s); k < recording.start(s) + pivotPlaces(s); k++) {
+                mine = Math.max(mine, changed[in[k]]);
+            }
+            for (int k = at; k < end; k++) {
+                mine = Math.max(mine, changed[in[k]]);
+            }
+            level[s] = mine;
+            int targets = targets(s);
+            for (int k = end; k < end + targets; k++) {
+                changed[in[k]] = Math.max(changed[in[k]], mine + 1);
+            }
+            levels = Math.max(levels, mine + 1);
+        }
+        return levels;
+    }
+
+    private int pivotPlaces(int s) {
+        return recording.kind(s) == Recording.BLOCK ? 3 : 1;
+    }
+
+    private int readFrom(int s) {
+        return recording.start(s) + pivotPlaces(s) + (recording.kind(s) == Recording.GENERAL ? 2 : 1);
+    }
+
+    private int targetsFrom(int s) {
+        int at = recording.start(s) + pivotPlaces(s);
+        int m = in[at];
+        return readFrom(s) + switch (recording.kind(s)) {
+            case Recording.GENERAL -> m + in[at + 1];
+            case Recording.DIAGONAL -> m;
+            default -> 2 * m;
+        };
+    }
+
+    private int targets(int s) {
+        int at = recording.start(s) + pivotPlaces(s);
+        int m = in[at];
+        return recording.kind(s) == Recording.GENERAL ? m * in[at + 1] : m * (m + 1) / 2;
+    }
+
+    private void header(int[] order, int from, int to) {
+        out.add(to - from);
+        int countAt = out.extend(1);
+        int loads = 0;
+        for (int k = from; k < to; k++) {
+            int at = recording.start(order[k]);
+            loads += loadMissing(in, at, pivotPlaces(order[k]));
+        }
+        out.set(countAt, loads);
+        for (int k = from; k < to; k++) {
+            int s = order[k];
+            out.add(recording.kind(s));
+            for (int p = 0; p < pivotPlaces(s); p++) {
+                out.add(slotOf[in[recording.start(s) + p]]);
+            }
+        }
+    }
+
+    private void body(int s) {
+        int from = readFrom(s);
+        int end = targetsFrom(s) + targets(s);
+        load(in, from, end - from);
+        int sizes = recording.start(s) + pivotPlaces(s);
+        for (int k = sizes; k < from; k++) {
+            out.add(in[k]);
+        }
+        int at = out.extend(end - from);
+        int[] raw = out.raw();
+        for (int k = from; k < end; k++) {
+            raw[at + k - from] = slotOf[in[k]];
+        }
+        for (int k = recording.start(s); k < sizes; k++) {
+            free.add(slotOf[in[k]]);
+        }
+        for (int k = from; k < targetsFrom(s); k++) {
+            free.add(slotOf[in[k]]);
+        }
+    }
+
+    private void load(int[] placesToLoad, int from, int count) {
+        int countAt = out.extend(1);
+        out.set(countAt, loadMissing(placesToLoad, from, count));
+    }
+
+    private int loadMissing(int[] placesToLoad, int from, int count) {
+        int loads = 0;
+        for (int k = from; k < from + count; k++) {
+            int place = placesToLoad[k];
+            if (slotOf[place] < 0) {
+                slotOf[place] = free.size() > 0 ? free.removeLast() : slots++;
+                out.add(slotOf[place]);
+                out.add(place);
+                loads++;
+            }
+        }
+        return loads;
+    }
+}

@@ -1,0 +1,53 @@
+package ropewalk.invariant.chessboard.internal;
+
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import org.osgi.service.component.annotations.Component;
+import ropewalk.algebra.InvariantFactors;
+import ropewalk.algebra.SmallMatrix;
+import ropewalk.diagram.ConnectedPieces;
+import ropewalk.diagram.LinkDiagram;
+import ropewalk.invariant.Effort;
+import ropewalk.invariant.Method;
+import ropewalk.invariant.Outcome;
+import ropewalk.invariant.Value.IntegerList;
+import ropewalk.structure.GoeritzForms;
+
+/** The invariant factors of the Goeritz forms: their cokernels, and a summand Z for each further piece. */
+@Component(service = Method.class, property = {
+    Method.ID + "=factors.goeritz", Method.INVARIANT + "=factors", "service.ranking:Integer=100"})
+public final class FactorsMethodComponent implements Method<IntegerList> {
+
+    private static final int SMALL = 16;
+
+    @Override
+    public Outcome<IntegerList> measure(LinkDiagram link, Effort effort) {
+        GoeritzForms forms = GoeritzForms.of(link);
+        List<BigInteger> factors = List.of();
+        for (int p = 0; p < forms.count(); p++) {
+            List<BigInteger> more = ofPiece(forms, p, effort);
+            factors = p == 0 ? more : DirectSum.of(factors, more, 0);
+        }
+        int free = ConnectedPieces.of(link).count() - 1;
+        return new Outcome.Exact<>(new IntegerList(free == 0 ? factors : DirectSum.of(factors, List.of(), free)));
+    }
+
+    private static List<BigInteger> ofPiece(GoeritzForms forms, int piece, Effort effort) {
+        int n = forms.dimension(piece) - 1;
+        if (n <= SMALL) {
+            long[] form = new long[n * n];
+            long[] out = new long[n];
+            forms.fillReduced(piece, form);
+            int count = SmallMatrix.invariantFactors(form, n, n, out);
+            if (count >= 0) {
+                List<BigInteger> factors = new ArrayList<>(count);
+                for (int i = 0; i < count; i++) {
+                    factors.add(BigInteger.valueOf(out[i]));
+                }
+                return factors;
+            }
+        }
+        return InvariantFactors.of(forms.reduced(piece), effort::checkpoint);
+    }
+}

@@ -1,0 +1,19 @@
+package ropewalk.invariant.colouring.internal;
+
+import org.osgi.service.component.annotations.Component;
+import ropewalk.diagram.LinkDiagram;
+import ropewalk.invariant.Effort;
+import ropewalk.invariant.Method;
+import ropewalk.invariant.Outcome;
+import ropewalk.invariant.Value.IntegerValue;
+
+/** Fox 5-colourings by the rank of the colouring matrix modulo 5. */
+@Component(service = Method.class, property = {
+    Method.ID + "=fox5.rank", Method.INVARIANT + "=fox5", "service.ranking:Integer=100"})
+public final class Fox5MethodComponent implements Method<IntegerValue> {
+
+    @Override
+    public Outcome<IntegerValue> measure(LinkDiagram link, Effort effort) {
+        return new Outcome.Exact<>(new IntegerValue(FoxColourings.count(link, 5, effort::checkpoint)));
+    }
+}

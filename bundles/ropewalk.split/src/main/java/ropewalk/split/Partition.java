@@ -1,0 +1,183 @@
+package ropewalk.split;
+
+import java.util.Arrays;
+
+/**
+ * A partition of the components of a link. Classes are numbered from 0 by their smallest component. Immutable.
+ */
+public final class Partition {
+
+    private final int[] classOf;
+    private final int classes;
+
+    private Partition(int[] classOf, int classes) {
+        this.classOf = classOf;
+        this.classes = classes;
+    }
+
+    /**
+     * The partition in which components with equal marks share a class.
+     *
+     * @param marks any numbers, one for each component
+     * @return the partition
+     */
+    public static Partition of(int... marks) {
+        int[] classOf = new int[marks.length];
+        int[] first = new int[marks.length];
+        int[] order = new int[marks.length];
+        int classes = 0;
+        // Marks may be any numbers; a component looks for the earlier ones with its mark by sorting once.
+        Integer[] byMark = new Integer[marks.length];
+        Arrays.setAll(byMark, i -> i);
+        Arrays.sort(byMark, (a, b) -> marks[a] != marks[b] ? Integer.compare(marks[a], marks[b]) : Integer.compare(a, b));
+        for (int i = 0; i < byMark.length; i++) {
+            first[byMark[i]] = i > 0 && marks[byMark[i]] == marks[byMark[i - 1]] ? first[byMark[i - 1]] : byMark[i];
+        }
+        for (int i = 0; i < marks.length; i++) {
+            if (first[i] == i) {
+                order[i] = classes++;
+            }
+            classOf[i] = order[first[i]];
+        }
+        return new Partition(classOf, classes);
+    }
+
+    /**
+     * All components in one class.
+     *
+     * @param components how many
+     * @return the coarsest partition
+     */
+    public static Partition whole(int components) {
+        return new Partition(new int[components], Math.min(1, components));
+    }
+
+    /**
+     * Every component alone.
+     *
+     * @param components how many
+     * @return the finest partition
+     */
+    public static Partition singles(int components) {
+        int[] classOf = new int[components];
+        Arrays.setAll(classOf, i -> i);
+        return new Partition(classOf, components);
+    }
+
+    /**
+     * The finest partition that is coarser than both: classes that share a component are merged.
+     *
+     * @param other a partition of the same components
+     * @return the join
+     */
+    public Partition join(Partition other) {
+        int[] parent = new int[classes];
+        Arrays.setAll(parent, i -> i);
+        int[] representative = new int[other.classes];
+        Arrays.fill(representative, -1);
+        for (int i = 0; i < classOf.length; i++) {
+            int c = other.classOf[i];
+            if (representative[c] < 0) {
+                representative[c] = classOf[i];
+            } else {
+                parent[root(parent, classOf[i])] = root(parent, representative[c]);
+            }
+        }
+        int[] marks = new int[classOf.length];
+        for (int i = 0; i < marks.length; i++) {
+            marks[i] = root(parent, classOf[i]);
+        }
+        return of(marks);
+    }
+
+    private static int root(int[] parent, int x) {
+        int r = x;
+        while (parent[r] != r) {
+            parent[r] = parent[parent[r]];
+            r = parent[r];
+        }
+        return r;
+    }
+
+    /**
+     * The number of components.
+     *
+     * @return how many there are in all
+     */
+    public int size() {
+        return classOf.length;
+    }
+
+    /**
+     * The number of classes.
+     *
+     * @return how many there are
+     */
+    public int classes() {
+        return classes;
+    }
+
+    /**
+     * The class of a component.
+     *
+     * @param component counted from 0
+     * @return its class, counted from 0
+     */
+    public int classOf(int component) {
+        return classOf[component];
+    }
+
+    /**
+     * The components of a class.
+     *
+     * @param index the class, counted from 0
+     * @return for each component whether it belongs to the class
+     */
+    public boolean[] members(int index) {
+        boolean[] members = new boolean[classOf.length];
+        for (int i = 0; i < members.length; i++) {
+            members[i] = classOf[i] == index;
+        }
+        return members;
+    }
+
+    /**
+     * The partition as a JSON list of lists of component numbers, counted from 1: {@code [[1],[2,3]]}.
+     *
+     * @return one line
+     */
+    public String text() {
+        if (classes == 1 && classOf.length == 1) {
+            return "[[1]]";
+        }
+        StringBuilder[] lists = new StringBuilder[classes];
+        for (int i = 0; i < classOf.length; i++) {
+            StringBuilder list = lists[classOf[i]];
+            if (list == null) {
+                lists[classOf[i]] = new StringBuilder("[").append(i + 1);
+            } else {
+                list.append(',').append(i + 1);
+            }
+        }
+        StringBuilder out = new StringBuilder("[");
+        for (int c = 0; c < classes; c++) {
+            out.append(c == 0 ? "" : ",").append(lists[c]).append(']');
+        }
+        return out.append(']').toString();
+    }
+
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof Partition that && Arrays.equals(classOf, that.classOf);
+    }
+
+    @Override
+    public int hashCode() {
+        return Arrays.hashCode(classOf);
+    }
+
+    @Override
+    public String toString() {
+        return text();
+    }
+}

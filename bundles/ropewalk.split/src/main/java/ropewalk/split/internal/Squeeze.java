@@ -1,0 +1,135 @@
+package ropewalk.split.internal;
+
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Deque;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import ropewalk.diagram.LinkDiagram;
+import ropewalk.invariant.Effort;
+import ropewalk.split.Evidence;
+import ropewalk.split.Findings;
+import ropewalk.split.Partition;
+import ropewalk.split.Verdict;
+
+/**
+ * Squeezes the pieces of one link between a lower and an upper partition. The relation "no sphere separates i from j" is
+ * an equivalence; a sphere that misses the link misses every sublink, so inseparability passes from a sublink to the
+ * link, and after a witnessed separation each piece is treated by itself.
+ */
+final class Squeeze {
+
+    private final List<Stage> stages;
+    private final Effort effort;
+    private final int components;
+    private final List<Verdict.Argument> arguments = new ArrayList<>();
+    private final Set<String> tried = new LinkedHashSet<>();
+    private final Deque<Part> open = new ArrayDeque<>();
+    private final int[] piece;
+    private Partition together;
+    private int pieces = 1;
+
+    Squeeze(LinkDiagram link, List<Stage> stages, Effort effort) {
+        this.stages = stages;
+        this.effort = effort;
+        this.components = link.components();
+        this.together = Partition.singles(components);
+        this.piece = new int[components];
+        int[] all = new int[components];
+        Arrays.setAll(all, i -> i);
+        open.push(new Part(link, all, 0));
+    }
+
+    Verdict run() {
+        String limit = "";
+        try {
+            while (!open.isEmpty()) {
+                open.pop().run();
+            }
+        } catch (Effort.SpentException e) {
+            limit = e.getMessage();
+        }
+        return new Verdict(together, Partition.of(piece), arguments, new ArrayList<>(tried), limit);
+    }
+
+    /** A sublink that is not known to come apart, with the numbers its components have in the whole link. */
+    private final class Part implements Findings {
+
+        private final LinkDiagram link;
+        private final int[] numbers;
+        private final int firstStage;
+        private Partition known;
+        private boolean separated;
+
+        Part(LinkDiagram link, int[] numbers, int firstStage) {
+            this.link = link;
+            this.numbers = numbers;
+            this.firstStage = firstStage;
+            this.known = Partition.singles(numbers.length);
+        }
+
+        void run() {
+            for (int s = firstStage; s < stages.size() && numbers.length > 1; s++) {
+                Stage stage = stages.get(s);
+                tried.add(stage.name());
+                stage.work().on(link, this, effort);
+                if (separated || known.classes() == 1) {
+                    return;
+                }
+            }
+        }
+
+        @Override
+        public Partition together() {
+            return known;
+        }
+
+        @Override
+        public void together(Partition classes, Evidence evidence) {
+            Partition joined = known.join(classes);
+            if (joined.equals(known)) {
+                return;
+            }
+            known = joined;
+            int[] marks = new int[components];
+            Arrays.setAll(marks, i -> numbers.length + i);
+            for (int i = 0; i < numbers.length; i++) {
+                marks[numbers[i]] = classes.classOf(i);
+            }
+            Partition lifted = Partition.of(marks);
+            arguments.add(new Verdict.Argument(false, lifted, evidence));
+            together = together.join(lifted);
+        }
+
+        @Override
+        public void apart(Partition found, LinkDiagram diagram, Evidence evidence) {
+            if (separated || found.classes() < 2) {
+                return;
+            }
+            if (!found.join(known).equals(found)) {
+                throw new IllegalStateException("components proved inseparable were pulled apart: " + known + " against "
+                        + found + " by " + evidence.kind() + "; one of the two arguments is wrong");
+            }
+            separated = true;
+            int[] marks = new int[components];
+            Arrays.fill(marks, -1);
+            for (int c = found.classes() - 1; c >= 0; c--) {
+                boolean[] members = found.members(c);
+                int[] inside = new int[numbers.length];
+                int count = 0;
+                int mark = c == 0 ? piece[numbers[0]] : pieces++;
+                for (int i = 0; i < numbers.length; i++) {
+                    if (members[i]) {
+                        inside[count++] = numbers[i];
+                        piece[numbers[i]] = mark;
+                    }
+                    marks[numbers[i]] = found.classOf(i);
+                }
+                open.push(new Part(diagram.sublink(members), Arrays.copyOf(inside, count), 0));
+            }
+            arguments.add(new Verdict.Argument(true, Partition.of(marks), evidence));
+        }
+    }
+}

@@ -1,0 +1,142 @@
+package ropewalk.survey.internal;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import ropewalk.collection.CsvRows;
+import ropewalk.collection.RecordBlock;
+import ropewalk.diagram.LinkBatch;
+import ropewalk.diagram.LinkDiagram;
+import ropewalk.invariant.Outcome;
+import ropewalk.invariant.catalogue.RankedMethod;
+import ropewalk.split.Partition;
+import ropewalk.split.Verdict;
+
+/** Reads, measures and writes out one block after another; belongs to one worker. */
+final class BlockMeasurer {
+
+    private final Columns columns;
+    private final boolean strict;
+    private final ColumnMeasurer measurer;
+    private final VerdictMeasurer verdicts;
+    private final CodeReaders readers = new CodeReaders();
+    private final LinkBatch.Builder builder = new LinkBatch.Builder();
+    private final EvidenceLines evidence = new EvidenceLines();
+    private int failedCells;
+
+    BlockMeasurer(Columns columns, boolean strict, ColumnMeasurer measurer, VerdictMeasurer verdicts) {
+        this.columns = columns;
+        this.strict = strict;
+        this.measurer = measurer;
+        this.verdicts = verdicts;
+    }
+
+    FinishedBlock measure(Job job) {
+        ParsedBlock parsed = ParsedBlock.of(job.block, readers, builder);
+        LinkBatch batch = parsed.batch();
+        Clock clock = new Clock(batch.size());
+        CsvRows rivalRows = new CsvRows();
+        List<String[]> cells = new ArrayList<>();
+        for (Column column : columns.measured()) {
+            cells.add(cells(column, job, parsed, clock, rivalRows));
+        }
+        VerdictMeasurer.Cell[] decided = columns.hasVerdict() ? verdicts.decide(batch, clock) : null;
+        failedCells = 0;
+        CsvRows rows = new CsvRows();
+        for (int i = 0; i < batch.size(); i++) {
+            int record = parsed.records()[i];
+            LinkDiagram link = batch.link(i);
+            rows.field(job.block, record, job.block.header().name())
+                    .field(job.block, record, job.block.header().notation())
+                    .field(link.components()).field(link.crossings());
+            for (String[] column : cells) {
+                rows.field(column[i]);
+                failedCells += column[i].startsWith("!") ? 1 : 0;
+            }
+            if (decided != null) {
+                verdict(rows, decided[i], link.components());
+                if (decided[i].verdict() != null && !decided[i].verdict().arguments().isEmpty()) {
+                    evidence.add(job.block.name(record), link, decided[i].verdict());
+                }
+            }
+            rows.decimal(clock.micros(i), 6);
+            kept(rows, job, record);
+            rows.endRow();
+        }
+        return new FinishedBlock(job.block, rows, rivalRows, evidence.take(), parsed.rejections(), batch.size(),
+                failedCells);
+    }
+
+    private String[] cells(Column column, Job job, ParsedBlock parsed, Clock clock, CsvRows rivalRows) {
+        LinkBatch batch = parsed.batch();
+        String[] texts = new String[batch.size()];
+        Outcome<?>[] filled = measurer.fill(column, batch, job.salvaged, clock);
+        for (int i = 0; i < texts.length; i++) {
+            texts[i] = CellText.of(filled[i]);
+        }
+        if (!column.rivals().isEmpty()) {
+            List<Clock> clocks = new ArrayList<>();
+            Map<RankedMethod, Outcome<?>[]> rivals = new LinkedHashMap<>(
+                    measurer.rivals(column, batch, job.salvaged, clocks));
+            for (int i = 0; i < texts.length; i++) {
+                texts[i] = CellText.ofRivals(texts[i], rivals, i);
+            }
+            rivalRows(column, job, parsed, rivals, clocks, rivalRows);
+        }
+        return texts;
+    }
+
+    private static void rivalRows(Column column, Job job, ParsedBlock parsed, Map<RankedMethod, Outcome<?>[]> rivals,
+            List<Clock> clocks, CsvRows rows) {
+        RecordBlock block = job.block;
+        for (int i = 0; i < parsed.batch().size(); i++) {
+            int link = i;
+            List<Outcome<?>> outcomes = new ArrayList<>();
+            rivals.values().forEach(all -> outcomes.add(all[link]));
+            String agrees = CellText.agree(outcomes) ? "yes" : "no";
+            int m = 0;
+            for (Map.Entry<RankedMethod, Outcome<?>[]> rival : rivals.entrySet()) {
+                Outcome<?> outcome = rival.getValue()[i];
+                rows.field(block, parsed.records()[i], block.header().name()).field(column.id())
+                        .field(rival.getKey().id()).field(rival.getKey().origin()).field(CellText.of(outcome))
+                        .decimal(clocks.get(m++).micros(i), 6)
+                        .field(outcome instanceof Outcome.Exact ? agrees : "").endRow();
+            }
+        }
+    }
+
+    private void verdict(CsvRows rows, VerdictMeasurer.Cell cell, int components) {
+        Verdict verdict = cell.verdict();
+        if (verdict == null) {
+            failedCells++;
+            rows.field(cell.fault()).empty().empty().empty().empty();
+            return;
+        }
+        boolean trusted = !strict || components == 1;
+        boolean decided = trusted && verdict.isDecided();
+        Partition together = trusted ? verdict.together() : Partition.singles(components);
+        Partition apart = trusted ? verdict.apart() : Partition.whole(components);
+        rows.field(trusted ? verdict.word() : "undecided").field(decided ? apart.text() : "").field(apart.text())
+                .field(together.text()).field(kinds(verdict));
+    }
+
+    private static String kinds(Verdict verdict) {
+        StringBuilder out = new StringBuilder();
+        for (Verdict.Argument argument : verdict.arguments()) {
+            out.append(out.isEmpty() ? "" : ";").append(argument.evidence().kind()).append(':')
+                    .append(argument.evidence().grade());
+        }
+        return out.toString();
+    }
+
+    private static void kept(CsvRows rows, Job job, int record) {
+        for (int field : job.keptFields) {
+            if (field < 0) {
+                rows.empty();
+            } else {
+                rows.field(job.block, record, field);
+            }
+        }
+    }
+}
