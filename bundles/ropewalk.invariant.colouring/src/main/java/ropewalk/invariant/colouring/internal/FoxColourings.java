@@ -1,6 +1,8 @@
 package ropewalk.invariant.colouring.internal;
 
 import java.math.BigInteger;
+import java.util.Optional;
+import ropewalk.algebra.Kernel;
 import ropewalk.algebra.Rank;
 import ropewalk.algebra.SmallMatrix;
 import ropewalk.diagram.LinkDiagram;
@@ -28,5 +30,21 @@ final class FoxColourings {
             rank = Rank.modulo(matrix.unreduced(), prime, checkpoint);
         }
         return BigInteger.valueOf(prime).pow(columns - rank);
+    }
+
+    /** Colours of all arcs in a colouring that is not constant, the first of them 0; nothing if there is none. */
+    static Optional<int[]> example(LinkDiagram link, int prime, Runnable checkpoint) {
+        for (int[] colours : Kernel.modulo(ColouringMatrix.of(link).unreduced(), prime, checkpoint)) {
+            int[] shifted = colours.clone();
+            boolean constant = true;
+            for (int a = 0; a < shifted.length; a++) {
+                shifted[a] = Math.floorMod(shifted[a] - colours[0], prime);
+                constant &= shifted[a] == 0;
+            }
+            if (!constant) {
+                return Optional.of(shifted);
+            }
+        }
+        return Optional.empty();
     }
 }
