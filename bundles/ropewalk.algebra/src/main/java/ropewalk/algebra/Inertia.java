@@ -1,10 +1,15 @@
 package ropewalk.algebra;
 
-import ropewalk.algebra.internal.DenseBareiss;
+import ropewalk.algebra.internal.CertifiedInertia;
 
 /**
  * The inertia of a symmetric matrix: how many eigenvalues are positive, negative and zero, with multiplicity. An invariant of
  * congruence over the real numbers (J. J. Sylvester, 1852).
+ *
+ * <p><b>Method.</b> Up to 24 rows {@link SmallMatrix#symmetric}, where it can prove its arithmetic. Else two sparse
+ * factorisations in floating point with a proved bound for all their rounding, of the matrix shifted a little to either side,
+ * whose counts must add up to the exact rank (N. J. Higham 2002, chapter 11; H. Weyl 1912); where they do not, elimination with
+ * big integers for up to 1000 rows.
  *
  * @param positive the number of positive eigenvalues
  * @param negative the number of negative eigenvalues
@@ -35,7 +40,7 @@ public record Inertia(int positive, int negative, int zero) {
                 return new Inertia((int) result[2], (int) result[3], (int) result[1]);
             }
         }
-        int[] counts = DenseBareiss.inertia(symmetric, checkpoint);
+        int[] counts = CertifiedInertia.of(symmetric, checkpoint);
         return new Inertia(counts[0], counts[1], counts[2]);
     }
 

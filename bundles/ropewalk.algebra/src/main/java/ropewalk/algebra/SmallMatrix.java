@@ -265,6 +265,9 @@ public final class SmallMatrix {
                     }
                     if (j != k + 1) {
                         exchange(a, n, k + 1, j);
+                        long v = a[k * n + j];
+                        a[k * n + j] = a[k * n + k + 1];
+                        a[k * n + k + 1] = v;
                     }
                     return true;
                 }

@@ -20,7 +20,8 @@ final class HeaderRow {
         int first = end < 2 ? 0 : (b[0] & 0xff) << 8 | b[1] & 0xff;
         return switch (first) {
             case 0xfffe, 0xfeff -> "the byte order mark of UTF-16; save the file as UTF-8";
-            case 0x504b -> end > 3 && b[2] == 3 && b[3] == 4 ? "a zip archive or a spreadsheet; save the table as CSV in UTF-8" : null;
+            case 0x504b -> end > 3 && b[2] == 3 && b[3] == 4
+                    ? "a zip archive or a spreadsheet; save the table as CSV in UTF-8" : null;
             case 0x1f8b -> "a file compressed by gzip; decompress it first";
             default -> null;
         };
@@ -62,7 +63,8 @@ final class HeaderRow {
         }
         for (String column : columns) {
             if (column.strip().equalsIgnoreCase(required)) {
-                return "column " + Visible.quoted(column) + " found; call it '" + required + "', in small letters and without blanks";
+                return "column " + Visible.quoted(column) + " found; call it '"
+                        + required + "', in small letters and without blanks";
             }
         }
         return "no column '" + required + "' among " + found + "; " + EXPECTED;

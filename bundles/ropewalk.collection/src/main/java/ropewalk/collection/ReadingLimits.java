@@ -12,8 +12,8 @@ public record ReadingLimits(int blockRows, int blockBytes, int rowBytes) {
     private static final int LARGEST_ROW = 256 << 20;
 
     /**
-     * Checks the numbers. {@code rowBytes} is lowered to a quarter of the memory that the virtual machine may use, so that one
-     * row cannot exhaust it.
+     * Checks the numbers. {@code rowBytes} is lowered to an eighth of the memory that the virtual machine may use, so that
+     * a row, its copy in a block, and the block before it fit.
      *
      * @param blockRows rows
      * @param blockBytes bytes of a block
@@ -26,11 +26,11 @@ public record ReadingLimits(int blockRows, int blockBytes, int rowBytes) {
                     + rowBytes + "; each must be at least 1");
         }
         blockBytes = Math.min(blockBytes, LARGEST_ROW);
-        rowBytes = (int) Math.min(Math.min(rowBytes, LARGEST_ROW), Math.max(1, Runtime.getRuntime().maxMemory() / 4));
+        rowBytes = (int) Math.min(Math.min(rowBytes, LARGEST_ROW), Math.max(1, Runtime.getRuntime().maxMemory() / 8));
     }
 
     /**
-     * 256 rows or 128 KiB a block; rows up to 256 MiB, or a quarter of the memory if that is less.
+     * 256 rows or 128 KiB a block; rows up to 256 MiB, or an eighth of the memory if that is less.
      *
      * @return the limits to use unless there is a reason for others
      */

@@ -92,8 +92,8 @@ class BadRowsTest {
         assertRejected("n,planar", 9, "n", "2 fields found, the header has 3");
         assertRejected("n", 2, "n", "1 field found, the header has 3");
         assertRejected("\"\"", 3, "", "1 field found");
-        assertRejected("n,planar,X[1,2],X[2,1]", 13, "n", "6 fields found, the header has 3; a field that contains commas, most likely "
-                + "the code, must stand in quotes");
+        assertRejected("n,planar,X[1,2],X[2,1]", 13, "n", "6 fields found, the header has 3; "
+                + "a field that contains commas, most likely the code, must stand in quotes");
         assertRejected("n,planar,\"x\ny\",", 15, "n", "4 fields found");
     }
 
@@ -148,7 +148,8 @@ class BadRowsTest {
 
     @Test
     void lineBreaksOfAllKindsAndBlankLines() {
-        ReadBack read = ReadBack.ofAllSizes("\ufeff\r\n \t\rname,notation,code\r\ra,p,\"1\r2\r\n3\n4\"\r\n\r\n\t\n\"b\",\"p\",\"\"\"\"\rc,p,");
+        ReadBack read = ReadBack.ofAllSizes("\ufeff\r\n \t\rname,notation,code\r\r"
+                + "a,p,\"1\r2\r\n3\n4\"\r\n\r\n\t\n\"b\",\"p\",\"\"\"\"\rc,p,");
         assertEquals(List.of("5 [a, p, 1\r2\r\n3\n4]", "11 [b, p, \"]", "12 [c, p, ]"), read.shapes());
     }
 

@@ -1,9 +1,9 @@
 package ropewalk.collection;
 
+import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.SequenceInputStream;
-import java.io.ByteArrayInputStream;
 import java.nio.charset.StandardCharsets;
 import java.util.Collections;
 import java.util.List;
@@ -18,7 +18,8 @@ final class HugeInput {
     /** Arguments: the kind, the megabytes. Prints records, rejections, last line, last name. */
     public static void main(String[] arguments) throws IOException {
         long bytes = Long.parseLong(arguments[1]) << 20;
-        List<InputStream> parts = List.of(text("name,notation,code\n"), body(arguments[0], bytes), text("\nlast,planar,\"X[1,2]\"\n"));
+        List<InputStream> parts = List.of(text("name,notation,code\n"), body(arguments[0], bytes),
+                text("\nlast,planar,\"X[1,2]\"\n"));
         long records = 0;
         long rejections = 0;
         String last = "";
@@ -43,7 +44,8 @@ final class HugeInput {
             case "quoted" -> new SequenceInputStream(text("n,planar,\""), new Repeated("x", bytes));
             case "unclosed" -> new SequenceInputStream(text("n,planar,\"\n"), new Repeated("n,braid,aBaBaBa\n", bytes));
             case "all unclosed" -> new Repeated("n,planar,\"X[1,2]\n", bytes / 17 * 17);
-            case "unclosed with pairs" -> new SequenceInputStream(text("n,planar,\"\n"), new Repeated("n,\"\",aBaBaBaB\n", bytes / 14 * 14));
+            case "unclosed with pairs" -> new SequenceInputStream(text("n,planar,\"\n"),
+                    new Repeated("n,\"\",aBaBaBaB\n", bytes / 14 * 14));
             case "long rows" -> new Repeated("n,planar,\"" + "X[1,2]".repeat(1_300_000) + "\"\n", bytes / 7_800_012 * 7_800_012, 1);
             case "long names" -> new Repeated("\"" + "n\u00e9".repeat(2_600_000) + "\",planar\n", bytes / 7_800_010 * 7_800_010, 1);
             case "blank" -> new Repeated("\n", bytes);

@@ -32,7 +32,7 @@ class RandomTextTest {
         for (int n = 0; n < 1500; n++) {
             byte[] text = randomText(random, 1 + random.nextInt(n % 10 == 0 ? 200 : 25), seed % 2 == 0 ? 0.05 : 0);
             List<String> header = n % 2 == 0 ? List.of("name", "notation", "code") : List.of("code", "given", "name", "notation");
-            byte[] whole = joined(String.join(",", header).getBytes(StandardCharsets.UTF_8), "\n".getBytes(StandardCharsets.UTF_8), text);
+            byte[] whole = joined((String.join(",", header) + "\n").getBytes(StandardCharsets.UTF_8), text);
             ReadingLimits limits = ReadBack.allSizes(1 << 20).get(random.nextInt(30));
             String where = "seed " + seed + ", case " + n + ", " + limits + ", text " + shown(whole);
             assertEquals(SlowCollection.shapes(whole, header), ReadBack.of(whole, limits).shapes(), where);

@@ -28,12 +28,8 @@ public final class RandomDiagrams {
         return Shadow.uniform(random, vertices).diagram(random, random.nextInt(3));
     }
 
-    /** A diagram of one component; plane maps are drawn until one is a single curve. */
+    /** A diagram of one component, of fewer crossings than the plane map that it comes from. */
     public static LinkDiagram knot(Random random, int vertices) throws NotADiagramException {
-        Shadow shadow = Shadow.uniform(random, vertices);
-        while (shadow.curves() != 1) {
-            shadow = Shadow.uniform(random, vertices);
-        }
-        return shadow.diagram(random, 0);
+        return Shadow.uniform(random, vertices).joined().diagram(random, 0);
     }
 }

@@ -159,6 +159,39 @@ public final class Shadow {
         return curves;
     }
 
+    /**
+     * One curve out of all: a vertex where two curves meet is cut open so that they become one, until one is left. Takes
+     * a connected shadow; the result has fewer vertices.
+     */
+    public Shadow joined() {
+        int n = vertices();
+        Slow.Classes curves = new Slow.Classes(4 * n);
+        for (int d = 0; d < 4 * n; d++) {
+            curves.merge(d, mates[d]);
+            curves.merge(d, d ^ 2);
+        }
+        int[] joined = mates.clone();
+        int[] number = new int[n];
+        int left = 0;
+        for (int v = 0; v < n; v++) {
+            if (curves.of(4 * v) != curves.of(4 * v + 1)) {
+                curves.merge(4 * v, 4 * v + 1);
+                join(joined, joined[4 * v], joined[4 * v + 1]);
+                join(joined, joined[4 * v + 2], joined[4 * v + 3]);
+                number[v] = -1;
+            } else {
+                number[v] = left++;
+            }
+        }
+        int[] packed = new int[4 * left];
+        for (int d = 0; d < 4 * n; d++) {
+            if (number[d / 4] >= 0) {
+                packed[4 * number[d / 4] + d % 4] = 4 * number[joined[d] / 4] + joined[d] % 4;
+            }
+        }
+        return new Shadow(packed);
+    }
+
     /** A diagram on this shadow: random crossings, directions, component numbers, starts; circles mixed in. */
     public LinkDiagram diagram(Random random, int circles) throws NotADiagramException {
         int n = vertices();

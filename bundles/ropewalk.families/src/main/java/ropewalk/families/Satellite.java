@@ -18,8 +18,9 @@ public final class Satellite {
 
     /**
      * The cable of two strands: two parallels of the knot, both running its way, with the framing for their linking
-     * number. Framing 0 of a non-trivial knot: the determinant is 0 and the link does not split, since a sphere between
-     * the two boundary curves of an annulus would make the core trivial.
+     * number. With framing 0 the determinant is 0; if the knot is not trivial the link does not split all the same: its
+     * exterior is that of the knot and (pair of pants) × S¹, glued along a torus that is incompressible on both sides,
+     * hence irreducible.
      *
      * @param knot a diagram of one component
      * @param framing the linking number of the two components
@@ -50,7 +51,7 @@ public final class Satellite {
      *
      * @param knot a diagram of one component
      * @param framing the linking number of the parallels before they are cut and hooked; 0 is the usual one
-     * @return the doubled knot
+     * @return the link of two components
      * @throws IllegalArgumentException if the diagram has several components
      */
     public static LinkDiagram bingDouble(LinkDiagram knot, int framing) {

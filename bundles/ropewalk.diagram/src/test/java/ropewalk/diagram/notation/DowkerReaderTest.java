@@ -244,8 +244,10 @@ class DowkerReaderTest {
 
     @Test
     void randomKnots() {
-        Cases.run(600, 300, 60, (random, size) -> {
-            LinkDiagram d = RandomDiagrams.knot(random, size);
+        Cases.run(600, 300, 80, (random, vertices) -> {
+            LinkDiagram d = RandomDiagrams.knot(random, vertices);
+            int size = d.crossings();
+            assertEquals(1, d.components());
             int start = d.start(0);
             for (int i = random.nextInt(2 * size); i > 0; i--) {
                 start = d.next(start);
@@ -295,8 +297,8 @@ class DowkerReaderTest {
         LinkDiagram torus = read(text(evens));
         assertEquals(n, writhe(torus));
         Cases.run(31, 2, 3_000, (random, size) -> {
-            int more = 2_500 + random.nextInt(500);
-            LinkDiagram d = RandomDiagrams.knot(random, more);
+            LinkDiagram d = RandomDiagrams.knot(random, 4_000);
+            int more = d.crossings();
             int[] sequence = sequence(d, d.start(0), new int[2 * more], new int[more][2]);
             LinkDiagram again = read(text(sequence));
             assertEquals(more, again.crossings());

@@ -11,7 +11,7 @@ public interface MethodCatalogue {
      * The invariants that are defined or measured by somebody: the standard ones in the order of the results table,
      * then the others by id.
      *
-     * @return the entries as they are now
+     * @return the entries as they are now; the same list as before while nothing has come or gone
      */
     List<CatalogueEntry> entries();
 

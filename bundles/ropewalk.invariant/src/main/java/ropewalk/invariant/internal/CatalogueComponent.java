@@ -25,11 +25,25 @@ public final class CatalogueComponent implements MethodCatalogue {
     private final ConcurrentMap<Long, Definition> definitions = new ConcurrentHashMap<>();
     private final Ordering ordering = new Ordering();
 
+    /** The entries as they were put in order last; null after a change. */
+    private volatile List<CatalogueEntry> current;
+
     record Definition(long order, Invariant<?> invariant, String origin) { }
 
     @Override
     public List<CatalogueEntry> entries() {
-        return ordering.entries(methods.values(), definitions.values());
+        List<CatalogueEntry> known = current;
+        return known != null ? known : ordered();
+    }
+
+    private synchronized List<CatalogueEntry> ordered() {
+        List<CatalogueEntry> entries = List.copyOf(ordering.entries(methods.values(), definitions.values()));
+        current = entries;
+        return entries;
+    }
+
+    private synchronized void changed() {
+        current = null;
     }
 
     @Override
@@ -50,10 +64,12 @@ public final class CatalogueComponent implements MethodCatalogue {
         int ranking = reference.getProperty(Constants.SERVICE_RANKING) instanceof Integer r ? r : 0;
         methods.put(serviceId(reference), new RankedMethod(id, invariant, method, ranking, bundle.getSymbolicName(),
                 bundle.getVersion().toString(), bundle.adapt(BundleWiring.class).getClassLoader()));
+        changed();
     }
 
     void removeMethod(ServiceReference<Method<?>> reference) {
         methods.remove(serviceId(reference));
+        changed();
     }
 
     @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)
@@ -61,10 +77,12 @@ public final class CatalogueComponent implements MethodCatalogue {
         Bundle bundle = reference.getBundle();
         definitions.put(serviceId(reference), new Definition(serviceId(reference), invariant,
                 bundle.getSymbolicName() + " " + bundle.getVersion()));
+        changed();
     }
 
     void removeInvariant(ServiceReference<Invariant<?>> reference) {
         definitions.remove(serviceId(reference));
+        changed();
     }
 
     private static String text(ServiceReference<?> reference, String key) {

@@ -12,6 +12,7 @@ import org.osgi.service.component.annotations.ReferencePolicy;
 import ropewalk.diagram.LinkDiagram;
 import ropewalk.invariant.Effort;
 import ropewalk.split.Obstruction;
+import ropewalk.split.Partition;
 import ropewalk.split.Separator;
 import ropewalk.split.SplitDetection;
 import ropewalk.split.Verdict;
@@ -23,11 +24,14 @@ public final class SplitDetectionComponent implements SplitDetection {
     private final ConcurrentSkipListMap<Place, Stage> stages = new ConcurrentSkipListMap<>(
             Comparator.comparingInt(Place::cost).thenComparing(Place::name).thenComparingLong(Place::service));
 
+    private static final Verdict NOTHING_TO_SPLIT =
+            new Verdict(Partition.whole(1), Partition.whole(1), List.of(), List.of(), "");
+
     private record Place(int cost, String name, long service) { }
 
     @Override
     public Verdict decide(LinkDiagram link, Effort effort) {
-        return new Squeeze(link, List.copyOf(stages.values()), effort).run();
+        return link.components() < 2 ? NOTHING_TO_SPLIT : new Squeeze(link, List.copyOf(stages.values()), effort).run();
     }
 
     @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)

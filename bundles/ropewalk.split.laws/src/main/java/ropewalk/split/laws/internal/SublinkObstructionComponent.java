@@ -18,7 +18,7 @@ import ropewalk.split.Partition;
 @Component(property = Obstruction.COST + ":Integer=100")
 public final class SublinkObstructionComponent implements Obstruction {
 
-    private final MethodCatalogue catalogue;
+    private final Laws laws;
 
     /**
      * Made by the framework.
@@ -27,7 +27,7 @@ public final class SublinkObstructionComponent implements Obstruction {
      */
     @Activate
     public SublinkObstructionComponent(@Reference MethodCatalogue catalogue) {
-        this.catalogue = catalogue;
+        this.laws = new Laws(catalogue);
     }
 
     @Override
@@ -37,15 +37,15 @@ public final class SublinkObstructionComponent implements Obstruction {
 
     @Override
     public void examine(LinkDiagram link, Findings findings, Effort effort) {
-        List<Law> laws = Law.installed(catalogue);
-        if (laws.isEmpty()) {
+        List<Law> installed = laws.installed();
+        if (installed.isEmpty()) {
             return;
         }
         if (link.components() > 2) {
-            pairs(link, laws, findings, effort);
+            pairs(link, installed, findings, effort);
         }
         if (findings.together().classes() > 1) {
-            new Bipartitions(link, findings.together(), laws, effort).examine(findings);
+            new Bipartitions(link, findings.together(), installed, effort).examine(findings);
         }
     }
 

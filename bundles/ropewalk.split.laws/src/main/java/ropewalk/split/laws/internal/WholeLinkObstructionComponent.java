@@ -21,7 +21,7 @@ import ropewalk.split.Partition;
 @Component(property = Obstruction.COST + ":Integer=10")
 public final class WholeLinkObstructionComponent implements Obstruction {
 
-    private final MethodCatalogue catalogue;
+    private final Laws laws;
 
     /**
      * Made by the framework.
@@ -30,7 +30,7 @@ public final class WholeLinkObstructionComponent implements Obstruction {
      */
     @Activate
     public WholeLinkObstructionComponent(@Reference MethodCatalogue catalogue) {
-        this.catalogue = catalogue;
+        this.laws = new Laws(catalogue);
     }
 
     @Override
@@ -40,7 +40,7 @@ public final class WholeLinkObstructionComponent implements Obstruction {
 
     @Override
     public void examine(LinkDiagram link, Findings findings, Effort effort) {
-        for (Law law : Law.installed(catalogue)) {
+        for (Law law : laws.installed()) {
             Optional<Measured> measured = law.value(link, effort);
             if (measured.isEmpty()) {
                 continue;
