@@ -14,12 +14,14 @@ public final class Effort {
     private static final ThreadMXBean THREADS = ManagementFactory.getThreadMXBean();
 
     private final long limitNanos;
+    private final Effort whole;
     private long spentBefore;
     private boolean running;
     private volatile boolean cancelled;
 
-    private Effort(long limitNanos) {
+    private Effort(long limitNanos, Effort whole) {
         this.limitNanos = limitNanos;
+        this.whole = whole;
     }
 
     /**
@@ -32,7 +34,21 @@ public final class Effort {
         if (!(seconds > 0)) {
             throw new IllegalArgumentException("an effort of " + seconds + " seconds; it must be above 0");
         }
-        return new Effort((long) Math.min(seconds * 1e9, 9e18));
+        return new Effort((long) Math.min(seconds * 1e9, 9e18), null);
+    }
+
+    /**
+     * A part of this effort for one of several attempts: it ends when the part is used up, or the whole. Whoever catches
+     * its {@link SpentException} calls {@link #checkpoint} on the whole, to learn which of the two it was.
+     *
+     * @param share of the whole limit, above 0 and at most 1
+     * @return an effort for the same thread
+     */
+    public Effort part(double share) {
+        if (!(share > 0 && share <= 1)) {
+            throw new IllegalArgumentException("a share of " + share + "; it must be above 0 and at most 1");
+        }
+        return new Effort((long) (limitNanos * share), this);
     }
 
     /** Begins the next cell: from here the time is counted anew. */
@@ -47,6 +63,9 @@ public final class Effort {
      * @throws SpentException if the effort is used up or the work was cancelled; let it through
      */
     public void checkpoint() {
+        if (whole != null) {
+            whole.checkpoint();
+        }
         if (cancelled) {
             throw new SpentException("cancelled");
         }

@@ -3,8 +3,8 @@ package ropewalk.algebra.internal;
 import java.util.Arrays;
 
 /**
- * Turns a recording into a program: sorts the pivots by level of the elimination tree (R. Schreiber, ACM TOMS 8 (1982)
- * 256–276) and gives every place a slot for the time between its first and its last use. Linear in the recording.
+ * Turns a recording into a program: takes the steps in the order of a {@link Schedule} and gives every place a slot for the
+ * time between its first and its last use. Linear in the recording.
  */
 final class Compiler {
     private final Recording recording;
@@ -35,27 +35,17 @@ final class Compiler {
     }
 
     private Program compile(int places, long[] initial, int[] rest) {
-        int steps = recording.steps();
-        int[] level = new int[steps];
-        int levels = levels(level, places);
-        int[] start = new int[levels + 1];
-        for (int s = 0; s < steps; s++) {
-            start[level[s] + 1]++;
-        }
+        Schedule schedule = Schedule.of(parents(places), weights());
+        int[] order = schedule.order;
+        int groups = schedule.start.length - 1;
         int widest = 0;
-        for (int k = 0; k < levels; k++) {
-            widest = Math.max(widest, start[k + 1]);
-            start[k + 1] += start[k];
-        }
-        int[] next = start.clone();
-        int[] order = new int[steps];
-        for (int s = 0; s < steps; s++) {
-            order[next[level[s]]++] = s;
-        }
-        for (int k = 0; k < levels; k++) {
-            header(order, start[k], start[k + 1]);
-            for (int s = start[k]; s < start[k + 1]; s++) {
-                body(order[s]);
+        for (int g = 0; g < groups; g++) {
+            int from = schedule.start[g];
+            int to = schedule.start[g + 1];
+            widest = Math.max(widest, to - from);
+            header(order, from, to);
+            for (int k = from; k < to; k++) {
+                body(order[k]);
             }
         }
         int[] code = out.toArray();
@@ -64,31 +54,37 @@ final class Compiler {
         for (int place : rest) {
             out.add(slotOf[place]);
         }
-        return new Program(code, levels, widest, slots, initial, out.toArray(), rest.length);
+        return new Program(code, groups, widest, slots, initial, out.toArray(), rest.length);
     }
 
-    /** A step reads its pivot and the places beside it: it comes after all steps that changed one of them. */
-    private int levels(int[] level, int places) {
-        int[] changed = new int[places];
-        int levels = 0;
-        for (int s = 0; s < level.length; s++) {
-            int at = readFrom(s);
-            int end = targetsFrom(s);
-            int mine = 0;
+    /** The first step that reads what a step changes; every place is read by one step at most. */
+    private int[] parents(int places) {
+        int[] reader = new int[places];
+        Arrays.fill(reader, Integer.MAX_VALUE);
+        int[] parent = new int[recording.steps()];
+        for (int s = parent.length - 1; s >= 0; s--) {
+            int first = Integer.MAX_VALUE;
+            int targetsFrom = targetsFrom(s);
+            for (int k = targetsFrom; k < targetsFrom + targets(s); k++) {
+                first = Math.min(first, reader[in[k]]);
+            }
+            parent[s] = first == Integer.MAX_VALUE ? -1 : first;
             for (int k = recording.start(s); k < recording.start(s) + pivotPlaces(s); k++) {
-                mine = Math.max(mine, changed[in[k]]);
+                reader[in[k]] = s;
             }
-            for (int k = at; k < end; k++) {
-                mine = Math.max(mine, changed[in[k]]);
+            for (int k = readFrom(s); k < targetsFrom; k++) {
+                reader[in[k]] = s;
             }
-            level[s] = mine;
-            int targets = targets(s);
-            for (int k = end; k < end + targets; k++) {
-                changed[in[k]] = Math.max(changed[in[k]], mine + 1);
-            }
-            levels = Math.max(levels, mine + 1);
         }
-        return levels;
+        return parent;
+    }
+
+    private int[] weights() {
+        int[] weight = new int[recording.steps()];
+        for (int s = 0; s < weight.length; s++) {
+            weight[s] = pivotPlaces(s) + targetsFrom(s) - readFrom(s);
+        }
+        return weight;
     }
 
     private int pivotPlaces(int s) {

@@ -1,17 +1,21 @@
 package ropewalk.algebra.internal;
 
+import java.util.function.Supplier;
 import ropewalk.algebra.IntegerMatrix;
 
-/** A recorded elimination: pivot rows and columns, their rank, and the program. */
+/** A recorded elimination: pivot rows and columns, their rank, and the program, made when it is first asked for. */
 final class Elimination {
     private final int[] rows;
     private final int[] columns;
-    private final Program program;
+    private final int[] rest;
+    private final Supplier<Program> compiler;
+    private Program program;
 
-    private Elimination(int[] rows, int[] columns, Program program) {
+    private Elimination(int[] rows, int[] columns, int[] rest, Supplier<Program> compiler) {
         this.rows = rows;
         this.columns = columns;
-        this.program = program;
+        this.rest = rest;
+        this.compiler = compiler;
     }
 
     static Elimination record(IntegerMatrix matrix, boolean symmetric, long prime, Runnable checkpoint) {
@@ -21,7 +25,9 @@ final class Elimination {
             SymmetricElimination run = new SymmetricElimination(matrix, field, recording, checkpoint);
             run.run();
             int[] used = run.used();
-            return new Elimination(used, used, Compiler.compile(recording, run.places(), run.initial(), run.rest()));
+            int[] rest = run.rest();
+            return new Elimination(used, used, rest,
+                () -> Compiler.compile(recording, run.places(), run.initial(), rest));
         }
         GeneralElimination run = new GeneralElimination(matrix, new PrimeValues(matrix, field), recording, checkpoint);
         run.run();
@@ -31,11 +37,16 @@ final class Elimination {
             rows[k] = run.pivotRow(k);
             columns[k] = run.pivotColumn(k);
         }
-        long[] initial = new long[matrix.entries()];
-        for (int k = 0; k < initial.length; k++) {
-            initial[k] = matrix.value(k);
+        int[] rest = run.rest();
+        return new Elimination(rows, columns, rest, () -> Compiler.compile(recording, run.places(), values(matrix), rest));
+    }
+
+    private static long[] values(IntegerMatrix matrix) {
+        long[] values = new long[matrix.entries()];
+        for (int k = 0; k < values.length; k++) {
+            values[k] = matrix.value(k);
         }
-        return new Elimination(rows, columns, Compiler.compile(recording, run.places(), initial, run.rest()));
+        return values;
     }
 
     /** The number of pivots. */
@@ -51,7 +62,16 @@ final class Elimination {
         return columns;
     }
 
+    /** Whether nothing at all is left after the pivots, whatever the prime: then the rank is proved. */
+    boolean isComplete() {
+        return rest.length == 0;
+    }
+
+    /** The program; not thread-safe. */
     Program program() {
+        if (program == null) {
+            program = compiler.get();
+        }
         return program;
     }
 

@@ -45,7 +45,7 @@ public final class ModularDeterminant {
         long chosen = Primes.range(0, 1)[0];
         while (true) {
             Elimination elimination = Elimination.record(matrix, symmetric, chosen, checkpoint);
-            if (elimination.rank() < matrix.rows() && elimination.program().rest == 0) {
+            if (elimination.rank() < matrix.rows() && elimination.isComplete()) {
                 return BigInteger.ZERO;
             }
             PrimeBudget budget = new PrimeBudget(elimination, needed, checkpoint);

@@ -33,7 +33,7 @@ public final class ModularRank {
         while (true) {
             Elimination elimination = Elimination.record(matrix, symmetric, chosen, checkpoint);
             int rank = elimination.rank();
-            if (rank == Math.min(matrix.rows(), matrix.columns()) || elimination.program().rest == 0) {
+            if (rank == Math.min(matrix.rows(), matrix.columns()) || elimination.isComplete()) {
                 return elimination;
             }
             double bits = Math.max(0, MinorBound.ofBordered(matrix, elimination));

@@ -3,7 +3,7 @@ package ropewalk.algebra.internal;
 /**
  * A straight-line program: an elimination with fixed pivots, to be run modulo many primes. Immutable.
  *
- * <p>The pivots are sorted into levels; those of a level neither read nor change each other's rows and columns, so that one
+ * <p>The pivots are sorted into groups, called levels; those of a level neither read nor change each other's rows and columns, so that one
  * inversion serves all of them. A level is: the number of its pivots, loads, then per pivot kind and slots of the pivot (one,
  * or three for a block), then per pivot loads, m, for {@link Recording#GENERAL} l, and the slots of the step. Loads are
  * their number and pairs of slot and place. Places below {@code initial.length} start with that value, others with 0.

@@ -18,11 +18,11 @@ import ropewalk.diagram.NotADiagramException;
  *
  * <p>Crossings are numbered in the order of the sequence; the knot starts on the edge that leads into passage 1.
  *
- * <p>Cost: O(n) beside the embedding; at most 100,000 crossings, since the embedding takes about 4 KB for each.
+ * <p>Cost: O(n) beside the embedding; at most 20,000 crossings, since the embedding takes about 7 KB for each.
  */
 final class DowkerReader implements CodeReader {
 
-    static final int MOST_CROSSINGS = 100_000;
+    static final int MOST_CROSSINGS = 20_000;
 
     private int[] evens = new int[64];          // signed, by crossing
     private int[] offsets = new int[64];

@@ -100,6 +100,6 @@ final class ShadowEmbedding {
                 .collect(Collectors.joining(", "));
         return new CodeException(offsets[crossings.first()], "no closed curve in the plane has this sequence: its crossings "
                 + names + (crossings.size() > MOST_NAMED ? ", …" : "") + " (odd numbers) hold a subdivision of "
-                + (five ? "K5" : "K3,3") + "; check the numbers from here on");
+                + (five ? "K5" : "K3,3") + ", which is not planar; at least one of their numbers must be another");
     }
 }

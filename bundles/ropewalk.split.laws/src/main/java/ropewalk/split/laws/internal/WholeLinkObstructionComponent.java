@@ -1,6 +1,8 @@
 package ropewalk.split.laws.internal;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.osgi.service.component.annotations.Activate;
@@ -21,6 +23,8 @@ import ropewalk.split.Partition;
 @Component(property = Obstruction.COST + ":Integer=10")
 public final class WholeLinkObstructionComponent implements Obstruction {
 
+    private static final double FIRST_SHARE = 0.05;
+
     private final Laws laws;
 
     /**
@@ -40,22 +44,37 @@ public final class WholeLinkObstructionComponent implements Obstruction {
 
     @Override
     public void examine(LinkDiagram link, Findings findings, Effort effort) {
-        for (Law law : laws.installed()) {
-            Optional<Measured> measured = law.value(link, effort);
-            if (measured.isEmpty()) {
-                continue;
+        List<Law> open = new ArrayList<>(laws.installed());
+        // A dear invariant must not use up what a cheap one needs: a small part of the effort for each, then the rest.
+        for (double share : new double[] {FIRST_SHARE, 1}) {
+            Effort part = effort.part(share);
+            for (Law law : List.copyOf(open)) {
+                part.restart();
+                try {
+                    apply(law, link, findings, part);
+                    open.remove(law);
+                } catch (Effort.SpentException e) {
+                    effort.checkpoint();
+                }
+                if (findings.together().classes() == 1) {
+                    return;
+                }
             }
-            if (!law.admitsSplit(measured.get().value())) {
-                findings.together(Partition.whole(link.components()), evidence(law, measured.get()));
-                return;
-            }
-            Set<Pair> ties = law.ties(measured.get().value());
-            if (!ties.isEmpty()) {
-                findings.together(joined(ties, link.components()), evidence(law, measured.get()));
-            }
-            if (findings.together().classes() == 1) {
-                return;
-            }
+        }
+    }
+
+    private static void apply(Law law, LinkDiagram link, Findings findings, Effort effort) {
+        Optional<Measured> measured = law.value(link, effort);
+        if (measured.isEmpty()) {
+            return;
+        }
+        if (!law.admitsSplit(measured.get().value())) {
+            findings.together(Partition.whole(link.components()), evidence(law, measured.get()));
+            return;
+        }
+        Set<Pair> ties = law.ties(measured.get().value());
+        if (!ties.isEmpty()) {
+            findings.together(joined(ties, link.components()), evidence(law, measured.get()));
         }
     }
 

@@ -15,7 +15,7 @@ import ropewalk.split.Partition;
 import ropewalk.split.Separator;
 
 /** Removes kinks and bigons (Reidemeister's first and second move) until none is left, and looks for loose pieces. */
-@Component(property = Obstruction.COST + ":Integer=50")
+@Component(property = Obstruction.COST + ":Integer=5")
 public final class ReductionSeparatorComponent implements Separator {
 
     private final String origin;
