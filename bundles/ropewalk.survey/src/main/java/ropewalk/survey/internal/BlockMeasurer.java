@@ -17,6 +17,7 @@ import ropewalk.split.Verdict;
 final class BlockMeasurer {
 
     private final Columns columns;
+    private final RowShape shape;
     private final boolean strict;
     private final ColumnMeasurer measurer;
     private final VerdictMeasurer verdicts;
@@ -25,8 +26,9 @@ final class BlockMeasurer {
     private final EvidenceLines evidence = new EvidenceLines();
     private int failedCells;
 
-    BlockMeasurer(Columns columns, boolean strict, ColumnMeasurer measurer, VerdictMeasurer verdicts) {
+    BlockMeasurer(Columns columns, RowShape shape, boolean strict, ColumnMeasurer measurer, VerdictMeasurer verdicts) {
         this.columns = columns;
+        this.shape = shape;
         this.strict = strict;
         this.measurer = measurer;
         this.verdicts = verdicts;
@@ -47,9 +49,7 @@ final class BlockMeasurer {
         for (int i = 0; i < batch.size(); i++) {
             int record = parsed.records()[i];
             LinkDiagram link = batch.link(i);
-            rows.field(job.block, record, job.block.header().name())
-                    .field(job.block, record, job.block.header().notation())
-                    .field(link.components()).field(link.crossings());
+            shape.begin(rows, job.block, record, link);
             for (String[] column : cells) {
                 rows.field(column[i]);
                 failedCells += column[i].startsWith("!") ? 1 : 0;
@@ -60,8 +60,7 @@ final class BlockMeasurer {
                     evidence.add(job.block.name(record), link, decided[i].verdict());
                 }
             }
-            rows.decimal(clock.micros(i), 6);
-            kept(rows, job, record);
+            shape.end(rows, job, record, clock.micros(i));
             rows.endRow();
         }
         return new FinishedBlock(job.block, rows, rivalRows, evidence.take(), parsed.rejections(), batch.size(),
@@ -128,15 +127,5 @@ final class BlockMeasurer {
                     .append(argument.evidence().grade());
         }
         return out.toString();
-    }
-
-    private static void kept(CsvRows rows, Job job, int record) {
-        for (int field : job.keptFields) {
-            if (field < 0) {
-                rows.empty();
-            } else {
-                rows.field(job.block, record, field);
-            }
-        }
     }
 }

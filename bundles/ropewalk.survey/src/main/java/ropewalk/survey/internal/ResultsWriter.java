@@ -10,7 +10,7 @@ import ropewalk.collection.Rejection;
 import ropewalk.survey.SurveyListener;
 
 /** Writes the files of one survey, block by block in input order. */
-final class ResultsWriter implements AutoCloseable {
+final class ResultsWriter implements Pass.Sink, AutoCloseable {
 
     private final OutputStream results;
     private final OutputStream evidence;
@@ -39,7 +39,8 @@ final class ResultsWriter implements AutoCloseable {
         }
     }
 
-    void write(FinishedBlock block) throws IOException {
+    @Override
+    public void take(FinishedBlock block) throws IOException {
         block.results().writeTo(results);
         if (evidence != null) {
             evidence.write(block.evidence());
@@ -48,14 +49,15 @@ final class ResultsWriter implements AutoCloseable {
             block.rivals().writeTo(rivals);
         }
         for (Rejection rejection : block.rejections()) {
-            reject(rejection);
+            take(rejection);
         }
         repeated(block.block());
         links += block.links();
         failedCells += block.failedCells();
     }
 
-    void reject(Rejection rejection) throws IOException {
+    @Override
+    public void take(Rejection rejection) throws IOException {
         rejected.add(rejection);
     }
 

@@ -1,11 +1,10 @@
 package ropewalk.survey.internal;
 
 import java.io.IOException;
-import java.io.UncheckedIOException;
+import java.util.List;
 import java.util.concurrent.CountDownLatch;
-import java.util.concurrent.ExecutionException;
 import java.util.concurrent.TimeUnit;
-import java.util.concurrent.TimeoutException;
+import ropewalk.invariant.catalogue.CatalogueEntry;
 import ropewalk.invariant.catalogue.MethodCatalogue;
 import ropewalk.split.SplitDetection;
 import ropewalk.survey.Survey.RequestException;
@@ -13,10 +12,12 @@ import ropewalk.survey.SurveyListener;
 import ropewalk.survey.SurveyReport;
 import ropewalk.survey.SurveyRequest;
 
-/** One survey from its first byte to its last; the thread that runs it writes the results. */
+/**
+ * One survey from its first byte to its last; the thread that runs it writes the results. Its columns are fixed at the
+ * start; what arrives meanwhile is measured in a further pass after the last row.
+ */
 final class SurveyRun {
 
-    private static final long PROGRESS_NANOS = 200_000_000;
     private static final long CLOSE_SECONDS = 5;
 
     private final SurveyRequest request;
@@ -25,9 +26,7 @@ final class SurveyRun {
     private final SurveyListener listener;
     private final CountDownLatch closed = new CountDownLatch(1);
     private volatile boolean stopped;
-    private volatile Intake intake;
-    private long bytesRead;
-    private long lastProgress;
+    private volatile Pass pass;
 
     SurveyRun(SurveyRequest request, MethodCatalogue catalogue, SplitDetection detection, SurveyListener listener) {
         this.request = request;
@@ -39,9 +38,9 @@ final class SurveyRun {
     /** Stops after the rows that are ready, and waits until the files are closed. */
     void stop() {
         stopped = true;
-        Intake reading = intake;
-        if (reading != null) {
-            reading.stop();
+        Pass running = pass;
+        if (running != null) {
+            running.stop();
         }
         try {
             if (!closed.await(CLOSE_SECONDS, TimeUnit.SECONDS)) {
@@ -58,79 +57,51 @@ final class SurveyRun {
             Columns columns = Columns.of(request, catalogue.entries(), detection != null);
             OutputFolder folder = OutputFolder.of(request);
             long firstByte = System.nanoTime();
-            intake = new Intake(request.files(), request.jobs());
-            Header header = Header.of(columns, intake.headers());
+            Pass first = begin();
+            Header header = first.header(columns);
             folder.prepare();
-            Workers workers = new Workers(request, columns, catalogue, detection, listener);
             ResultsWriter writer = new ResultsWriter(folder, header, columns.hasVerdict(),
                     columns.measured().stream().anyMatch(c -> !c.rivals().isEmpty()), listener);
             boolean complete;
             try (writer) {
-                intake.start(header, workers.jobs());
-                complete = write(writer);
-            } finally {
-                workers.close();
+                complete = first.run(columns, new RowShape.Whole(header), catalogue, detection, writer);
             }
-            return new SurveyReport(folder.path(), writer.links(), writer.rejections(), writer.failedCells(), firstByte,
-                    System.nanoTime(), complete);
+            long failedCells = writer.failedCells();
+            if (complete) {
+                failedCells += arrivals(columns, header, folder);
+            }
+            return new SurveyReport(folder.path(), writer.links(), writer.rejections(), failedCells, firstByte,
+                    System.nanoTime(), complete && !stopped);
         } finally {
             closed.countDown();
         }
     }
 
-    private boolean write(ResultsWriter writer) throws IOException {
-        long all = Intake.bytesInAll(request.files());
-        try {
-            while (true) {
-                Intake.Item item = intake.next();
-                if (item == Intake.Item.END) {
-                    return !stopped;
-                }
-                if (item.broken() != null) {
-                    throw new IllegalStateException("reading broke off: " + item.broken(), item.broken());
-                }
-                if (item.unreadable() != null) {
-                    writer.reject(item.unreadable());
-                    continue;
-                }
-                FinishedBlock block = await(item);
-                if (block == null) {
-                    return false;
-                }
-                writer.write(block);
-                intake.written(block.block());
-                progress(writer, block, all);
-            }
-        } catch (InterruptedException e) {
-            Thread.currentThread().interrupt();
-            return false;
+    private Pass begin() {
+        Pass next = new Pass(request, listener);
+        pass = next;
+        if (stopped) {
+            next.stop();
         }
+        return next;
     }
 
-    /** The block, or null if the survey is stopped before it is ready. */
-    private FinishedBlock await(Intake.Item item) throws InterruptedException {
-        while (true) {
-            try {
-                return item.block().get(100, TimeUnit.MILLISECONDS);
-            } catch (TimeoutException e) {
-                if (stopped) {
-                    return null;
-                }
-            } catch (ExecutionException e) {
-                if (e.getCause() instanceof UncheckedIOException io) {
-                    throw io;
-                }
-                throw new IllegalStateException("measuring broke off: " + e.getCause(), e.getCause());
-            }
+    /** Measures what arrived during the survey; gives the number of failed cells. */
+    private long arrivals(Columns columns, Header header, OutputFolder folder) throws IOException {
+        List<CatalogueEntry> entries = catalogue.entries();
+        Columns added = Columns.ofArrivals(request, entries).without(columns);
+        if (added.measured().isEmpty()) {
+            return 0;
         }
-    }
-
-    private void progress(ResultsWriter writer, FinishedBlock block, long all) {
-        bytesRead += block.block().bytes().length;
-        long now = System.nanoTime();
-        if (now - lastProgress > PROGRESS_NANOS) {
-            lastProgress = now;
-            listener.progress(writer.links(), Math.min(bytesRead, all), all);
+        listener.message(String.join(", ", added.measured().stream().map(Column::id).toList())
+                + " arrived during the survey; measuring it in a further pass");
+        Pass further = begin();
+        Header now = further.header(columns.with(added, entries));
+        try (FurtherPass join = new FurtherPass(folder.path().resolve(OutputFolder.RESULTS), header, now, added)) {
+            if (further.run(added, new RowShape.CellsAlone(now), catalogue, null, join)) {
+                join.finish();
+            }
+            return join.failedCells();
         }
     }
 }

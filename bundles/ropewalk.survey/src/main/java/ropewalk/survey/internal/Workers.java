@@ -17,6 +17,7 @@ final class Workers {
 
     private final SurveyRequest request;
     private final Columns columns;
+    private final RowShape shape;
     private final MethodCatalogue catalogue;
     private final SplitDetection detection;
     private final SurveyListener listener;
@@ -27,10 +28,11 @@ final class Workers {
     private final Thread watcher;
     private volatile boolean closed;
 
-    Workers(SurveyRequest request, Columns columns, MethodCatalogue catalogue, SplitDetection detection,
-            SurveyListener listener) {
+    Workers(SurveyRequest request, Columns columns, RowShape shape, MethodCatalogue catalogue,
+            SplitDetection detection, SurveyListener listener) {
         this.request = request;
         this.columns = columns;
+        this.shape = shape;
         this.catalogue = catalogue;
         this.detection = detection;
         this.listener = listener;
@@ -71,7 +73,7 @@ final class Workers {
         ColumnMeasurer measurer = new ColumnMeasurer(catalogue, benches, activity, effort);
         VerdictMeasurer verdicts = columns.hasVerdict()
                 ? new VerdictMeasurer(detection, benches, activity, effort) : null;
-        Worker worker = new Worker(jobs, new BlockMeasurer(columns, request.strict(), measurer, verdicts), measurer,
+        Worker worker = new Worker(jobs, new BlockMeasurer(columns, shape, request.strict(), measurer, verdicts), measurer,
                 activity, effort);
         Thread thread = new Thread(worker, "survey worker");
         thread.setDaemon(true);
