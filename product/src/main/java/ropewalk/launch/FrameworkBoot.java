@@ -39,6 +39,8 @@ final class FrameworkBoot implements AutoCloseable {
         Map<String, String> configuration = new HashMap<>(properties);
         configuration.put(Constants.FRAMEWORK_STORAGE, storage.toString());
         configuration.put("felix.log.level", "1");
+        // The component runtime would print the stack traces of failed components; Components tells them in a line each.
+        configuration.put("ds.loglevel", "0");
         Framework framework = ServiceLoader.load(FrameworkFactory.class).findFirst().orElseThrow()
                 .newFramework(configuration);
         framework.start();

@@ -22,7 +22,8 @@ final class GuestJar {
         }
         try (JarFile file = new JarFile(jar.toFile())) {
             Manifest manifest = file.getManifest();
-            if (manifest == null || manifest.getMainAttributes().getValue(Constants.BUNDLE_SYMBOLICNAME) == null) {
+            String name = manifest == null ? null : manifest.getMainAttributes().getValue(Constants.BUNDLE_SYMBOLICNAME);
+            if (name == null || name.isBlank()) {
                 return Optional.of("is no bundle: its manifest lacks " + Constants.BUNDLE_SYMBOLICNAME
                         + "; build it as an OSGi bundle");
             }

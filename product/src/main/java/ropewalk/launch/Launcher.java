@@ -73,13 +73,15 @@ final class Launcher {
         String name = line.subcommand().orElseThrow();
         ServiceReference<?> service = subcommands.await(name, SERVICE_MILLIS)
                 .orElseThrow(() -> missing(name, features, subcommands, framework));
+        int status;
         try {
-            return subcommands.run(service, line.arguments().toArray(String[]::new))
-                    .orElseThrow(() -> new Refusal(Refusal.BROKEN, "subcommand '" + name
-                            + "' is offered by " + service.getBundle() + ", which cannot make it; look for its reason above"));
+            status = subcommands.run(service, line.arguments().toArray(String[]::new)).orElse(Refusal.BROKEN);
         } catch (RuntimeException | Error fault) {
-            return broken(name, fault);
+            status = broken(name, fault);
         }
+        // Told at the end, since a component is made when it is first asked for. The subcommand's own may be among them.
+        new Components(framework.context()).failed().forEach(Console::line);
+        return status;
     }
 
     private static int help(Subcommands subcommands, FrameworkBoot framework) throws InterruptedException {
@@ -93,7 +95,8 @@ final class Launcher {
         if (offered.isEmpty()) {
             System.out.println("  (no started feature offers a subcommand)");
         }
-        new Unmet(framework.context()).services().forEach(Console::line);
+        Components components = new Components(framework.context());
+        components.waiting().forEach(Console::line);
         return 0;
     }
 
@@ -104,7 +107,7 @@ final class Launcher {
         } catch (Refusal unreadable) {
             return unreadable;
         }
-        List<String> waiting = new Unmet(framework.context()).services();
+        List<String> waiting = new Components(framework.context()).waiting();
         String reasons = waiting.isEmpty() ? "" : " (" + String.join("; ", waiting) + ")";
         if (feature.isEmpty()) {
             return new Refusal(Refusal.USAGE,

@@ -1,5 +1,6 @@
 package ropewalk.launch;
 
+import java.io.File;
 import java.net.URISyntaxException;
 import java.nio.file.Path;
 
@@ -14,6 +15,10 @@ public final class Main {
      * @param arguments as the user gave them
      */
     public static void main(String[] arguments) {
+        String mark = System.getProperty("ropewalk.mark");
+        if (mark != null) {
+            new File(mark).deleteOnExit();   // the shell launcher's sign that this process uses its build
+        }
         int status;
         try {
             String version = Main.class.getPackage().getImplementationVersion();

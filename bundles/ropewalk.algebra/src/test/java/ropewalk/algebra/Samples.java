@@ -8,8 +8,8 @@ final class Samples {
     }
 
     /**
-     * The Laplacian of a side × side square grid with random diagonals, about a quarter of the edges missing or doubled, all
-     * weights random signs; the last row and column struck. Planar, with separators of the order of the side: the hard case.
+     * The Laplacian of a side × side square grid with random diagonals, some edges missing, all weights
+     * random signs, or all 1; the last row and column struck. Planar, with separators of the order of the side: the hard case.
      */
     static IntegerMatrix planarLaplacian(int side, Random random, boolean alternating) {
         IntegerMatrix.Builder builder = IntegerMatrix.builder(side * side, side * side);
@@ -17,10 +17,11 @@ final class Samples {
             for (int j = 0; j < side; j++) {
                 int v = i * side + j;
                 int kind = random.nextInt(8);
-                if (j + 1 < side && kind != 0) {
+                // All columns of the grid are there and the first row: it stays connected.
+                if (j + 1 < side && (kind != 0 || i == 0)) {
                     edge(builder, v, v + 1, weight(random, alternating));
                 }
-                if (i + 1 < side && kind != 1) {
+                if (i + 1 < side) {
                     edge(builder, v, v + side, weight(random, alternating));
                 }
                 if (i + 1 < side && j + 1 < side && kind < 3) {

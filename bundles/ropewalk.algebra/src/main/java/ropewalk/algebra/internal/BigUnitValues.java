@@ -4,13 +4,21 @@ import java.math.BigInteger;
 import java.util.Arrays;
 import ropewalk.algebra.IntegerMatrix;
 
-/** Values modulo a big number; the pivots are the residues prime to it. What was found out about a value is kept. */
+/**
+ * Values modulo a big number; the pivots are the residues prime to it. A residue may be a pivot if it has no factor in common
+ * with the small prime divisors of the modulus, which is quickly seen and nearly always enough; a pivot that is chosen is
+ * confirmed by its inverse. What was found out about a value is kept until it changes.
+ */
 final class BigUnitValues implements ResidueValues {
     private static final byte UNKNOWN = 0;
     private static final byte UNIT = 1;
     private static final byte NO_UNIT = 2;
+    private static final byte HOPEFUL = 3;
+
+    private static final int LARGEST_SMALL_PRIME = 1000;
 
     private final BigInteger modulus;
+    private final long smallDivisors;
     private BigInteger[] value;
     private byte[] known;
     private BigInteger inverse;
@@ -18,6 +26,7 @@ final class BigUnitValues implements ResidueValues {
 
     BigUnitValues(IntegerMatrix matrix, BigInteger modulus) {
         this.modulus = modulus;
+        this.smallDivisors = smallDivisors(modulus);
         int entries = matrix.entries();
         value = new BigInteger[entries + entries / 2 + 16];
         known = new byte[value.length];
@@ -33,11 +42,43 @@ final class BigUnitValues implements ResidueValues {
         return value[place];
     }
 
+    /** The product of the small primes that divide a number, or of as many of them as fit into a long. */
+    private static long smallDivisors(BigInteger number) {
+        long product = 1;
+        for (int q = 2; q < LARGEST_SMALL_PRIME && product < Long.MAX_VALUE / LARGEST_SMALL_PRIME; q++) {
+            if (Primes.isPrime(q) && number.mod(BigInteger.valueOf(q)).signum() == 0) {
+                product *= q;
+            }
+        }
+        return product;
+    }
+
     @Override
     public boolean isPivot(int place) {
         if (known[place] == UNKNOWN) {
-            BigInteger v = value[place];
-            known[place] = v.signum() != 0 && v.gcd(modulus).equals(BigInteger.ONE) ? UNIT : NO_UNIT;
+            known[place] = hasSmallDivisor(value[place]) ? NO_UNIT : HOPEFUL;
+        }
+        return known[place] != NO_UNIT;
+    }
+
+    private boolean hasSmallDivisor(BigInteger v) {
+        if (v.signum() == 0 || smallDivisors == 1) {
+            return v.signum() == 0;
+        }
+        long a = v.mod(BigInteger.valueOf(smallDivisors)).longValue();
+        long b = smallDivisors;
+        while (a != 0) {
+            long r = b % a;
+            b = a;
+            a = r;
+        }
+        return b != 1;
+    }
+
+    @Override
+    public boolean confirm(int place) {
+        if (known[place] != UNIT) {
+            known[place] = value[place].gcd(modulus).equals(BigInteger.ONE) ? UNIT : NO_UNIT;
         }
         return known[place] == UNIT;
     }

@@ -35,7 +35,8 @@ final class Compiler {
     }
 
     private Program compile(int places, long[] initial, int[] rest) {
-        Schedule schedule = Schedule.of(parents(places), weights());
+        int[] level = levels(places);
+        Schedule schedule = recording.isSymmetric() ? Schedule.of(level, parents(places), weights()) : Schedule.of(level);
         int[] order = schedule.order;
         int groups = schedule.start.length - 1;
         int widest = 0;
@@ -55,6 +56,27 @@ final class Compiler {
             out.add(slotOf[place]);
         }
         return new Program(code, groups, widest, slots, initial, out.toArray(), rest.length);
+    }
+
+    /** A step reads its pivot and the places beside it: it comes after all steps that changed one of them. */
+    private int[] levels(int places) {
+        int[] level = new int[recording.steps()];
+        int[] changed = new int[places];
+        for (int s = 0; s < level.length; s++) {
+            int targetsFrom = targetsFrom(s);
+            int mine = 0;
+            for (int k = recording.start(s); k < recording.start(s) + pivotPlaces(s); k++) {
+                mine = Math.max(mine, changed[in[k]]);
+            }
+            for (int k = readFrom(s); k < targetsFrom; k++) {
+                mine = Math.max(mine, changed[in[k]]);
+            }
+            level[s] = mine;
+            for (int k = targetsFrom; k < targetsFrom + targets(s); k++) {
+                changed[in[k]] = Math.max(changed[in[k]], mine + 1);
+            }
+        }
+        return level;
     }
 
     /** The first step that reads what a step changes; every place is read by one step at most. */

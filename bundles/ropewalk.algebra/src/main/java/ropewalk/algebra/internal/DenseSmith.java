@@ -50,6 +50,7 @@ final class DenseSmith {
         int row = -1;
         int column = -1;
         for (int i = t; i < rows && !least.equals(BigInteger.ONE); i++) {
+            checkpoint.run();
             for (int j = t; j < columns; j++) {
                 if (a[i][j].signum() != 0) {
                     BigInteger divisor = a[i][j].gcd(m);

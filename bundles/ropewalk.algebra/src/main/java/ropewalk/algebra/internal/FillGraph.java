@@ -78,6 +78,9 @@ final class FillGraph {
     }
 
     int newPlace() {
+        if ((places & 0xffff) == 0) {
+            Memory.check(places, 32, "filled places");
+        }
         return places++;
     }
 

@@ -182,6 +182,7 @@ final class FloatingInertia {
         positive += d > 0 ? 1 : 0;
         negative += d < 0 ? 1 : 0;
         for (int i = 0, t = 0; i < m; i++) {
+            pause(i);
             double x = value[first[i]];
             double l = x / d;
             count(v, others[i], U * Math.abs(x));
@@ -219,6 +220,7 @@ final class FloatingInertia {
             count(w, others[i], e1[i]);
         }
         for (int i = 0, t = 0; i < m; i++) {
+            pause(i);
             for (int j = i; j < m; j++) {
                 double p = w0[i] * value[first[j]];
                 double q = w1[i] * value[second[j]];
@@ -228,6 +230,13 @@ final class FloatingInertia {
                 count(others[i], others[j], U * (Math.abs(sum) + 3 * (Math.abs(p) + Math.abs(q)))
                     + Math.abs(w0[i]) * e0[j] + Math.abs(w1[i]) * e1[j]);
             }
+        }
+    }
+
+    /** A step with many rows takes longer than a millisecond. */
+    private void pause(int row) {
+        if ((row & 15) == 15) {
+            checkpoint.run();
         }
     }
 

@@ -63,6 +63,7 @@ final class GeneralElimination {
     private long bestCost;
     private int bestRow;
     private int bestColumn;
+    private int bestPlace;
 
     GeneralElimination(IntegerMatrix matrix, PlaceValues values, Listener listener, Runnable checkpoint) {
         this.values = values;
@@ -126,7 +127,9 @@ final class GeneralElimination {
         }
         while (choose()) {
             checkpoint.run();
-            eliminate(bestRow, bestColumn);
+            if (values.confirm(bestPlace)) {
+                eliminate(bestRow, bestColumn);
+            }
         }
     }
 
@@ -246,7 +249,7 @@ final class GeneralElimination {
             // The test may be dear: not asked where the answer would not matter.
             if (!rowDone[i] && (!found || cost(i, j) < bestCost) && values.isPivot(columnPlace[j][k])) {
                 found = true;
-                consider(i, j);
+                consider(i, j, columnPlace[j][k]);
             }
         }
         return found;
@@ -258,7 +261,7 @@ final class GeneralElimination {
             int j = rowColumn[i][k];
             if (!columnDone[j] && (!found || cost(i, j) < bestCost) && values.isPivot(rowPlace[i][k])) {
                 found = true;
-                consider(i, j);
+                consider(i, j, rowPlace[i][k]);
             }
         }
         return found;
@@ -268,12 +271,13 @@ final class GeneralElimination {
         return (rowCount[i] - 1L) * (columnCount[j] - 1L);
     }
 
-    private void consider(int i, int j) {
+    private void consider(int i, int j, int place) {
         long cost = cost(i, j);
         if (cost < bestCost) {
             bestCost = cost;
             bestRow = i;
             bestColumn = j;
+            bestPlace = place;
         }
     }
 
@@ -292,6 +296,7 @@ final class GeneralElimination {
             values.startStep(pivot);
         }
         for (int k = 0; k < m; k++) {
+            checkpoint.run();
             change(belowRow[k], below[k], l, k * l);
         }
         for (int c = 0; c < l; c++) {
@@ -387,6 +392,9 @@ final class GeneralElimination {
     }
 
     private int newPlace(int row, int column) {
+        if ((places & 0xffff) == 0) {
+            Memory.check(places, 40, "filled places");
+        }
         int place = places++;
         values.room(places);
         int length = rowLength[row]++;

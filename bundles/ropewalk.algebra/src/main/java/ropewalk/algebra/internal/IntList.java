@@ -37,6 +37,7 @@ final class IntList {
             throw new ropewalk.algebra.MatrixTooLargeException("an elimination needs more than " + (Integer.MAX_VALUE - 8)
                 + " steps on record; the matrix fills in too much for sparse elimination, split it into blocks");
         }
+        Memory.check(wanted, Integer.BYTES, "recorded steps");
         data = Arrays.copyOf(data, (int) wanted);
     }
 

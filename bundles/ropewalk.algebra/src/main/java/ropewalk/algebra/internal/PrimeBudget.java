@@ -48,7 +48,12 @@ final class PrimeBudget {
         int laneCount = lanes();
         ProgramRun run = new ProgramRun(elimination.program(), laneCount, checkpoint);
         boolean checkRest = elimination.program().rest > 0;
+        // Each pivot is a quotient of minors, and a minor has fewer prime divisors of this size than primes are needed.
+        long mostSkipped = 1000 + 2L * (elimination.rank() + 1) * (primes.length + 1);
         for (int next = 0; good < primes.length; next += laneCount) {
+            if (next - good > mostSkipped) {
+                throw new IllegalStateException("of " + next + " primes only " + good + " left all pivots standing");
+            }
             Lanes lanes = new Lanes(Primes.range(next, next + laneCount));
             run.run(lanes);
             boolean[] zero = checkRest ? run.restIsZero() : null;

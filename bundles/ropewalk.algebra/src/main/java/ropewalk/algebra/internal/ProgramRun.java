@@ -130,6 +130,7 @@ final class ProgramRun {
         int beside = below + m;
         int target = beside + l;
         for (int i = 0; i < m; i++) {
+            checkpoint.run();
             lanes.multiply(scaled, slot[code[below + i]], inverseOfPivot);
             for (int j = 0; j < l; j++) {
                 lanes.subtractProduct(slot[code[target++]], scaled, slot[code[beside + j]]);
@@ -143,6 +144,7 @@ final class ProgramRun {
         int beside = at;
         int target = beside + m;
         for (int i = 0; i < m; i++) {
+            checkpoint.run();
             lanes.multiply(scaled, slot[code[beside + i]], inverseOfPivot);
             for (int j = i; j < m; j++) {
                 lanes.subtractProduct(slot[code[target++]], scaled, slot[code[beside + j]]);
@@ -158,6 +160,7 @@ final class ProgramRun {
         int second = first + m;
         int target = second + m;
         for (int i = 0; i < m; i++) {
+            checkpoint.run();
             double[] x = slot[code[first + i]];
             double[] y = slot[code[second + i]];
             lanes.multiply(scaled, d, x);

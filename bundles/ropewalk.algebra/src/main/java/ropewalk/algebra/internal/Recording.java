@@ -15,6 +15,7 @@ final class Recording implements GeneralElimination.Listener, SymmetricEliminati
     private final IntList kinds = new IntList(256);
     private final IntList starts = new IntList(256);
     private final IntList code;
+    private boolean symmetric = true;
 
     Recording(int entries) {
         code = new IntList(4 * entries);
@@ -23,6 +24,7 @@ final class Recording implements GeneralElimination.Listener, SymmetricEliminati
     @Override
     public void step(int pivot, int[] below, int m, int[] beside, int[] columns, int l, int[] targets) {
         begin(GENERAL);
+        symmetric = false;
         code.add(pivot);
         code.add(m);
         code.add(l);
@@ -60,6 +62,11 @@ final class Recording implements GeneralElimination.Listener, SymmetricEliminati
     private void append(int[] values, int count) {
         int at = code.extend(count);
         System.arraycopy(values, 0, code.raw(), at, count);
+    }
+
+    /** Whether all steps are symmetric ones. */
+    boolean isSymmetric() {
+        return symmetric;
     }
 
     int steps() {

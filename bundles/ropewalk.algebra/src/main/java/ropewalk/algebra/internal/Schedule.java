@@ -5,14 +5,14 @@ import java.util.Arrays;
 /**
  * An order for the steps of an elimination that keeps what is live small and lets many steps share one inversion.
  *
- * <p>A step must come after the steps that change what it reads; the first reader of what a step changes is its parent in the
- * elimination tree (R. Schreiber, ACM TOMS 8 (1982) 256–276). Subtrees that fit into a processor's cache are done one after the
+ * <p>A step must come after the steps that change what it reads. In a symmetric elimination the neighbours of a vertex become a
+ * clique, so all that depends on it lies on one path of the elimination tree (R. Schreiber, ACM TOMS 8 (1982) 256–276). Subtrees that fit into a processor's cache are done one after the
  * other, neighbouring small ones together, then the top of the tree; within such a block the steps are sorted by level, and
  * those of a level do not depend on each other.
  */
 final class Schedule {
-    /** Places read by the steps of a block: with 32 lanes of 8 bytes about 200 kB. */
-    private static final int BLOCK = 800;
+    /** Places read by the steps of a block: with 32 lanes of 8 bytes about half a megabyte. */
+    private static final int BLOCK = 2000;
 
     /** The steps in order. */
     final int[] order;
@@ -25,23 +25,31 @@ final class Schedule {
     }
 
     /**
-     * Makes the order.
+     * The order by levels only, for eliminations that have no tree.
      *
-     * @param parent for each step a later one, or -1
+     * @param level for each step a number larger than those of the steps it depends on
+     */
+    static Schedule of(int[] level) {
+        return sorted(new int[level.length], level);
+    }
+
+    /**
+     * The order by subtrees and levels.
+     *
+     * @param level for each step a number larger than those of the steps it depends on
+     * @param parent for each step a later one, an ancestor of which is every other step that depends on it; or -1
      * @param weight for each step the number of places it reads
      */
-    static Schedule of(int[] parent, int[] weight) {
+    static Schedule of(int[] level, int[] parent, int[] weight) {
         int steps = parent.length;
         int[] size = new int[steps];
         long[] heavy = new long[steps];
-        int[] level = new int[steps];
         for (int s = 0; s < steps; s++) {
             size[s]++;
             heavy[s] += weight[s];
             if (parent[s] >= 0) {
                 size[parent[s]] += size[s];
                 heavy[parent[s]] += heavy[s];
-                level[parent[s]] = Math.max(level[parent[s]], level[s] + 1);
             }
         }
         int[] atPost = postorder(parent, size);

@@ -129,6 +129,7 @@ final class SymmetricElimination {
         joinOthers(m);
         long minusInverse = m == 0 ? 0 : field.negate(field.inverse(value[v]));
         for (int i = 0, t = 0; i < m; i++) {
+            pause(i);
             long factor = field.multiply(value[first[i]], minusInverse);
             for (int j = i; j < m; j++) {
                 add(targets[t++], field.multiply(factor, value[first[j]]));
@@ -147,6 +148,7 @@ final class SymmetricElimination {
         long reciprocal = field.inverse(value[b]);
         long corner = field.multiply(value[w], field.multiply(reciprocal, reciprocal));
         for (int i = 0, t = 0; i < m; i++) {
+            pause(i);
             long x = value[first[i]];
             long y = value[second[i]];
             long factor = field.subtract(field.multiply(corner, x), field.multiply(reciprocal, y));
@@ -157,6 +159,13 @@ final class SymmetricElimination {
             }
         }
         listener.block(v, b, w, first, second, m, targets);
+    }
+
+    /** A step with many rows takes longer than a millisecond. */
+    private void pause(int row) {
+        if ((row & 15) == 15) {
+            checkpoint.run();
+        }
     }
 
     private void add(int place, long v) {

@@ -7,8 +7,8 @@ import ropewalk.diagram.NotADiagramException;
 
 /**
  * Removes kinks and bigons in place. A stack holds the crossings that may have a place at one of their corners. A
- * removal changes only regions along the edges that it joins, and a region of one or two corners has them at the ends
- * of its edges: so it is enough to look again at the ends of the joined edges, and the whole takes O(n).
+ * removal changes only regions along the edges that it joins, and a region of one or two corners has one at either end
+ * of each of its edges: so it is enough to look again at one end of every joined edge, and the whole takes O(n).
  */
 final class Reducer {
 
@@ -101,9 +101,6 @@ final class Reducer {
         mates[behind] = before;
         if (!gone[before >> 2]) {
             look(before >> 2);
-        }
-        if (!gone[behind >> 2]) {
-            look(behind >> 2);
         }
     }
 
