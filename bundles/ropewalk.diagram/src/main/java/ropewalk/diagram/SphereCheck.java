@@ -17,8 +17,10 @@ final class SphereCheck {
     /** Checks the map with the given mates, an involution without fixed points on the darts 0 … 4n-1. */
     void check(int n, int[] mates) throws NotADiagramException {
         if (stack.length < n) {
-            stack = new int[Math.max(n, 2 * Math.min(stack.length, 1 << 28))];
-            seen = new int[4 * n];
+            // Doubled, so that slowly growing diagrams do not allocate each time, within what an array can hold.
+            int room = Math.max(n, Math.min(2 * stack.length, 1 << 28));
+            stack = new int[room];
+            seen = new int[4 * room];
         }
         Arrays.fill(seen, 0, 4 * n, 0);
         int regions = 0;

@@ -54,6 +54,10 @@ record ParsedBlock(LinkBatch batch, int[] records, List<Rejection> rejections) {
             return null;
         } catch (CodeException e) {
             return block.rejectCode(i, Math.min(e.offset(), code.to()) - code.from(), e.getMessage());
+        } catch (RuntimeException | StackOverflowError e) {
+            // A fault of ours; it must not cost the other rows.
+            return block.rejectCode(i, 0, "the reader of '" + block.notation(i) + "' broke on this code (" + e
+                    + "); please report it with the row");
         } catch (OutOfMemoryError e) {
             return block.rejectCode(i, 0, "a code of " + code.length() + " bytes does not fit into memory; give the "
                     + "program more, for example with ROPEWALK_JAVA_OPTS=-Xmx8g");
