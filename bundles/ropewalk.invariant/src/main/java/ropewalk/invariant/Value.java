@@ -141,9 +141,18 @@ public sealed interface Value {
      */
     record PolynomialValue(List<Term> terms) implements Value {
 
-        // Keeps a copy.
+        // Keeps a copy; refuses what is not in order, so that no polynomial has two texts.
         public PolynomialValue {
             terms = List.copyOf(terms);
+            for (int i = 0; i < terms.size(); i++) {
+                if (terms.get(i).coefficient().signum() == 0) {
+                    throw new IllegalArgumentException("the coefficient of term " + (i + 1) + " is 0; leave it out");
+                }
+                if (i > 0 && !terms.get(i - 1).isBefore(terms.get(i))) {
+                    throw new IllegalArgumentException("the exponents " + terms.get(i).exponents() + " come after "
+                            + terms.get(i - 1).exponents() + "; give as many for each term, ascending in dictionary order");
+                }
+            }
         }
 
         @Override
@@ -168,6 +177,20 @@ public sealed interface Value {
         // Keeps a copy.
         public Term {
             exponents = List.copyOf(exponents);
+        }
+
+        /** Whether this term comes first in dictionary order; false for equal exponents and for other numbers of them. */
+        private boolean isBefore(Term other) {
+            if (exponents.size() != other.exponents.size()) {
+                return false;
+            }
+            for (int i = 0; i < exponents.size(); i++) {
+                int order = exponents.get(i).compareTo(other.exponents.get(i));
+                if (order != 0) {
+                    return order < 0;
+                }
+            }
+            return false;
         }
     }
 
@@ -244,9 +267,13 @@ public sealed interface Value {
 
         // Refuses what would not be one line, or would look like a failure.
         public TextValue {
-            if (value.startsWith("!") || value.chars().anyMatch(c -> c < ' ')) {
+            if (value.startsWith("!") || value.chars().anyMatch(TextValue::endsALine)) {
                 throw new IllegalArgumentException("a text value is one line and does not begin with '!'");
             }
+        }
+
+        private static boolean endsALine(int c) {
+            return Character.isISOControl(c) || c == '\u2028' || c == '\u2029';
         }
 
         @Override

@@ -88,6 +88,9 @@ public final class ValueText {
                 value = steps(items(tree, text), text);
             } else if (type == Value.TableValue.class) {
                 List<List<String>> rows = items(tree, text).stream().map(row -> strings(row, text)).toList();
+                if (rows.isEmpty()) {
+                    throw wrong(text);
+                }
                 value = new Value.TableValue(rows.get(0), rows.subList(1, rows.size()));
             } else {
                 throw new IllegalArgumentException(type.getName() + " is no type of value");

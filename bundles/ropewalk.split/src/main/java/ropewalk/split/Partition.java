@@ -69,8 +69,13 @@ public final class Partition {
      *
      * @param other a partition of the same components
      * @return the join
+     * @throws IllegalArgumentException if the other one is of another number of components
      */
     public Partition join(Partition other) {
+        if (other.size() != size()) {
+            throw new IllegalArgumentException("partitions of " + size() + " and " + other.size()
+                    + " components cannot be joined; give one of the same link");
+        }
         int[] parent = new int[classes];
         Arrays.setAll(parent, i -> i);
         int[] representative = new int[other.classes];

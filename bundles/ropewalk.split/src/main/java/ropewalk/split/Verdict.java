@@ -1,6 +1,7 @@
 package ropewalk.split;
 
 import java.util.List;
+import ropewalk.diagram.LinkDiagram;
 
 /**
  * What is known about the pieces of a link.
@@ -25,8 +26,17 @@ public record Verdict(Partition together, Partition apart, List<Argument> argume
      * @param isApart true for a witness, false for an obstruction
      * @param classes its partition of the components of the whole link
      * @param evidence the argument
+     * @param diagram the diagram that the evidence speaks of: the given one, or after a separation one of its parts
+     * @param components the number in the whole link of each component of that diagram, counted from 0
      */
-    public record Argument(boolean isApart, Partition classes, Evidence evidence) { }
+    public record Argument(boolean isApart, Partition classes, Evidence evidence, LinkDiagram diagram,
+            List<Integer> components) {
+
+        // Keeps a copy.
+        public Argument {
+            components = List.copyOf(components);
+        }
+    }
 
     /**
      * Whether the pieces are known: the two partitions meet.

@@ -12,7 +12,6 @@ import org.osgi.util.tracker.ServiceTracker;
 /** Waits, with a bound, for what a framework does in its own time. */
 public final class Services {
     private static final Duration LIMIT = Duration.ofSeconds(5);
-    private static final Duration PATIENCE = Duration.ofSeconds(20);   // for a process, on a busy machine
 
     private final BundleContext context;
 
@@ -51,17 +50,16 @@ public final class Services {
     public <S> S await(Class<S> type, String properties) {
         try {
             Filter filter = context.createFilter("(&(objectClass=" + type.getName() + ")" + properties + ")");
+            // The tracker stays open as long as the test bundle runs: a component that nobody holds any more is taken
+            // down, and the test would go on with an object whose references have been taken away.
             ServiceTracker<S, S> tracker = new ServiceTracker<>(context, filter, null);
             tracker.open();
-            try {
-                S service = tracker.waitForService(LIMIT.toMillis());
-                if (service == null) {
-                    throw new AssertionError("no service " + filter + " within " + LIMIT.toSeconds() + " s; " + states());
-                }
-                return service;
-            } finally {
+            S service = tracker.waitForService(LIMIT.toMillis());
+            if (service == null) {
                 tracker.close();
+                throw new AssertionError("no service " + filter + " within " + LIMIT.toSeconds() + " s; " + states());
             }
+            return service;
         } catch (InvalidSyntaxException wrong) {
             throw new IllegalArgumentException("not a filter: " + properties, wrong);
         } catch (InterruptedException stop) {
@@ -91,13 +89,13 @@ public final class Services {
      *
      * @param what it in words, for the message
      * @param holds asked every 20 ms
-     * @throws AssertionError when it does not hold within 20 s
+     * @throws AssertionError when it does not hold within 5 s
      */
     public static void until(String what, BooleanSupplier holds) {
-        long end = System.nanoTime() + PATIENCE.toNanos();
+        long end = System.nanoTime() + LIMIT.toNanos();
         while (!holds.getAsBoolean()) {
             if (System.nanoTime() > end) {
-                throw new AssertionError("not within " + PATIENCE.toSeconds() + " s: " + what);
+                throw new AssertionError("not within " + LIMIT.toSeconds() + " s: " + what);
             }
             try {
                 Thread.sleep(20);

@@ -7,6 +7,7 @@ import java.util.Deque;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import ropewalk.diagram.ConnectedPieces;
 import ropewalk.diagram.LinkDiagram;
 import ropewalk.invariant.Effort;
 import ropewalk.split.Evidence;
@@ -39,7 +40,7 @@ final class Squeeze {
         this.piece = new int[components];
         int[] all = new int[components];
         Arrays.setAll(all, i -> i);
-        open.push(new Part(link, all, 0));
+        open.push(new Part(link, all, together));
     }
 
     Verdict run() {
@@ -59,25 +60,22 @@ final class Squeeze {
 
         private final LinkDiagram link;
         private final int[] numbers;
-        private final int firstStage;
         private Partition known;
         private boolean separated;
 
-        Part(LinkDiagram link, int[] numbers, int firstStage) {
+        Part(LinkDiagram link, int[] numbers, Partition known) {
             this.link = link;
             this.numbers = numbers;
-            this.firstStage = firstStage;
-            this.known = Partition.singles(numbers.length);
+            this.known = known;
         }
 
         void run() {
-            for (int s = firstStage; s < stages.size() && numbers.length > 1; s++) {
-                Stage stage = stages.get(s);
-                tried.add(stage.name());
-                stage.work().on(link, this, effort);
+            for (Stage stage : stages) {
                 if (separated || known.classes() == 1) {
                     return;
                 }
+                tried.add(stage.name());
+                stage.work().on(link, this, effort);
             }
         }
 
@@ -92,6 +90,7 @@ final class Squeeze {
             if (joined.equals(known)) {
                 return;
             }
+            requireConnected(classes, evidence);
             known = joined;
             int[] marks = new int[components];
             Arrays.setAll(marks, i -> numbers.length + i);
@@ -99,8 +98,27 @@ final class Squeeze {
                 marks[numbers[i]] = classes.classOf(i);
             }
             Partition lifted = Partition.of(marks);
-            arguments.add(new Verdict.Argument(false, lifted, evidence));
+            arguments.add(argument(false, lifted, evidence));
             together = together.join(lifted);
+        }
+
+        private Verdict.Argument argument(boolean isApart, Partition classes, Evidence evidence) {
+            return new Verdict.Argument(isApart, classes, evidence, link, Arrays.stream(numbers).boxed().toList());
+        }
+
+        /** Whatever the order of the stages, what lies apart in the diagram itself is not inseparable. */
+        private void requireConnected(Partition classes, Evidence evidence) {
+            ConnectedPieces pieces = ConnectedPieces.of(link);
+            int[] pieceOfClass = new int[classes.classes()];
+            Arrays.fill(pieceOfClass, -1);
+            for (int i = 0; i < numbers.length; i++) {
+                int c = classes.classOf(i);
+                if (pieceOfClass[c] >= 0 && pieceOfClass[c] != pieces.ofComponent(i)) {
+                    throw new IllegalStateException("components that lie apart in the diagram were called inseparable: "
+                            + classes + " by " + evidence.kind() + "; that argument is wrong");
+                }
+                pieceOfClass[c] = pieces.ofComponent(i);
+            }
         }
 
         @Override
@@ -118,18 +136,21 @@ final class Squeeze {
             for (int c = found.classes() - 1; c >= 0; c--) {
                 boolean[] members = found.members(c);
                 int[] inside = new int[numbers.length];
+                int[] classes = new int[numbers.length];
                 int count = 0;
                 int mark = c == 0 ? piece[numbers[0]] : pieces++;
                 for (int i = 0; i < numbers.length; i++) {
                     if (members[i]) {
+                        classes[count] = known.classOf(i);
                         inside[count++] = numbers[i];
                         piece[numbers[i]] = mark;
                     }
                     marks[numbers[i]] = found.classOf(i);
                 }
-                open.push(new Part(diagram.sublink(members), Arrays.copyOf(inside, count), 0));
+                open.push(new Part(diagram.sublink(members), Arrays.copyOf(inside, count),
+                        Partition.of(Arrays.copyOf(classes, count))));
             }
-            arguments.add(new Verdict.Argument(true, Partition.of(marks), evidence));
+            arguments.add(argument(true, Partition.of(marks), evidence));
         }
     }
 }

@@ -1,6 +1,7 @@
 package ropewalk.survey.internal;
 
 import java.nio.charset.StandardCharsets;
+import java.util.stream.Collectors;
 import ropewalk.diagram.LinkDiagram;
 import ropewalk.diagram.notation.CodeWriter;
 import ropewalk.diagram.notation.Notations;
@@ -9,8 +10,9 @@ import ropewalk.split.Verdict;
 
 /**
  * Lines of evidence.jsonl, one for each argument: {@code format} (1), {@code link} (its name), {@code code} (planar code of
- * the diagram), {@code claim} ({@code together} or {@code apart}), {@code components} (the partition that is claimed),
- * {@code kind}, {@code grade}, {@code argument}.
+ * the diagram that the argument speaks of), {@code numbers} (the numbers in the link of that diagram's components; all of
+ * them until a separation leaves parts), {@code claim} ({@code together} or {@code apart}), {@code components} (the
+ * partition that is claimed, in the link's numbers), {@code kind}, {@code grade}, {@code argument}.
  */
 final class EvidenceLines {
 
@@ -24,13 +26,19 @@ final class EvidenceLines {
         String code = planar.write(link);
         String quotedName = ValueText.quoted(name);
         for (Verdict.Argument argument : verdict.arguments()) {
-            lines.append("{\"format\":1,\"link\":").append(quotedName).append(",\"code\":\"").append(code)
-                    .append("\",\"claim\":\"").append(argument.isApart() ? "apart" : "together")
+            lines.append("{\"format\":1,\"link\":").append(quotedName).append(",\"code\":\"")
+                    .append(argument.diagram() == link ? code : planar.write(argument.diagram()))
+                    .append("\",\"numbers\":").append(numbers(argument))
+                    .append(",\"claim\":\"").append(argument.isApart() ? "apart" : "together")
                     .append("\",\"components\":").append(argument.classes().text())
                     .append(",\"kind\":").append(ValueText.quoted(argument.evidence().kind()))
                     .append(",\"grade\":").append(ValueText.quoted(argument.evidence().grade()))
                     .append(",\"argument\":").append(argument.evidence().detail()).append("}\n");
         }
+    }
+
+    private static String numbers(Verdict.Argument argument) {
+        return argument.components().stream().map(i -> Integer.toString(i + 1)).collect(Collectors.joining(",", "[", "]"));
     }
 
     byte[] take() {

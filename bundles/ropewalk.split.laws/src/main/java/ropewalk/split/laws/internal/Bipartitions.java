@@ -95,7 +95,9 @@ final class Bipartitions {
 
     private void note(Law law, Bipartition which, Measured whole, Measured left, Measured right) {
         kinds.add("law." + law.entry().id());
-        origins.add(whole.by().origin());
+        for (Measured measured : List.of(whole, left, right)) {
+            origins.add(measured.by().origin());
+        }
         StringBuilder side = new StringBuilder();
         for (int i = 0; i < which.size(); i++) {
             if (which.isLeft(i)) {
