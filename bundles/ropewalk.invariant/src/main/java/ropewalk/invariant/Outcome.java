@@ -1,5 +1,7 @@
 package ropewalk.invariant;
 
+import java.util.Objects;
+
 /**
  * What a method says of a link; the package document tells what each kind means.
  *
@@ -13,7 +15,13 @@ public sealed interface Outcome<V extends Value> {
      * @param <V> the type of the value
      * @param value never null
      */
-    record Exact<V extends Value>(V value) implements Outcome<V> { }
+    record Exact<V extends Value>(V value) implements Outcome<V> {
+
+        // A value that is missing is the method's fault, and must show there.
+        public Exact {
+            Objects.requireNonNull(value, "an exact outcome without a value");
+        }
+    }
 
     /**
      * The method does not cover such links.

@@ -3,6 +3,7 @@ package ropewalk.invariant;
 import java.math.BigInteger;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Objects;
 
 /**
  * A measured value: one of a closed set of records. Each writes and reads one canonical one-line text
@@ -23,6 +24,11 @@ public sealed interface Value {
      * @param value any size
      */
     record IntegerValue(BigInteger value) implements Value {
+
+        // A number that is missing is the method's fault, and must show there.
+        public IntegerValue {
+            Objects.requireNonNull(value, "a whole number that is null");
+        }
 
         private static final IntegerValue[] SMALL = new IntegerValue[512];
 

@@ -75,8 +75,9 @@ public final class BundlesCommandComponent extends Subcommand {
                     + state(bundle) + guest);
         }
         System.out.println();
+        int ids = catalogue.entries().stream().mapToInt(e -> e.id().length()).max().orElse(0);
         for (CatalogueEntry entry : catalogue.entries()) {
-            System.out.println(padded(entry.id(), 14) + entry.definition().map(d -> d.title()).orElse("(not defined)"));
+            System.out.println(padded(entry.id(), ids + 1) + entry.definition().map(d -> d.title()).orElse("(not defined)"));
             for (RankedMethod method : entry.methods()) {
                 System.out.println("    " + padded(method.id(), 28) + method.origin());
             }

@@ -122,19 +122,23 @@ public final class SurveyCommandComponent extends Subcommand {
         }
     }
 
+    private static String counted(long number, String what) {
+        return number + " " + what + (number == 1 ? "" : "s");
+    }
+
     private static int closing(SurveyReport report) {
         if (!report.isComplete()) {
             message("stopped; " + report.links() + " rows are in " + report.folder());
             return BROKE;
         }
         if (report.rejected() > 0 || report.failedCells() > 0) {
-            message(report.rejected() + " rejected (see " + report.folder().resolve("rejected.csv") + "), "
-                    + report.failedCells() + " cells failed (they begin with '!')");
+            message(counted(report.rejected(), "row") + " rejected (see " + report.folder().resolve("rejected.csv") + "), "
+                    + counted(report.failedCells(), "cell") + " failed (beginning with '!')");
         }
         long started = System.currentTimeMillis() - ManagementFactory.getRuntimeMXBean().getStartTime();
         double starting = Math.max(0, started / 1e3 - (System.nanoTime() - report.firstByteNanos()) / 1e9);
-        message(String.format(Locale.ROOT, "%d links, %.2f s to start, %.3f s from first byte to last, %.0f links/s; "
-                + "results in %s", report.links(), starting, report.seconds(), report.links() / report.seconds(),
+        message(String.format(Locale.ROOT, "%s, %.2f s to start, %.3f s from first byte to last, %.0f links/s; "
+                + "results in %s", counted(report.links(), "link"), starting, report.seconds(), report.links() / report.seconds(),
                 report.folder()));
         return report.rejected() > 0 || report.failedCells() > 0 ? SOME_FAILED : DONE;
     }

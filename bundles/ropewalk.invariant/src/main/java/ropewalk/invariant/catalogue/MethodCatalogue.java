@@ -22,4 +22,11 @@ public interface MethodCatalogue {
      * @return false once its bundle was stopped or removed
      */
     boolean isInstalled(RankedMethod method);
+
+    /**
+     * Leaves a method out of {@link #entries} from now on, because it hangs; until its service comes anew.
+     *
+     * @param method a method that was listed before
+     */
+    void setAside(RankedMethod method);
 }

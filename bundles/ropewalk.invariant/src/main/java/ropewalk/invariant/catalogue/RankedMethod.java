@@ -44,7 +44,7 @@ public record RankedMethod(String id, String invariant, Method<?> method, int ra
             return outcome == null ? new Outcome.Failed<>("returned null") : outcome;
         } catch (Effort.SpentException e) {
             throw e;
-        } catch (RuntimeException | StackOverflowError | OutOfMemoryError | LinkageError | AssertionError e) {
+        } catch (Throwable e) {
             return failed(e);
         } finally {
             thread.setContextClassLoader(before);

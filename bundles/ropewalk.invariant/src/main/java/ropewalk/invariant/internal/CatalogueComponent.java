@@ -1,6 +1,7 @@
 package ropewalk.invariant.internal;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.ConcurrentMap;
 import org.osgi.framework.Bundle;
@@ -51,6 +52,12 @@ public final class CatalogueComponent implements MethodCatalogue {
         return methods.containsValue(method);
     }
 
+    @Override
+    public void setAside(RankedMethod method) {
+        methods.values().remove(method);
+        changed();
+    }
+
     @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)
     void addMethod(ServiceReference<Method<?>> reference, Method<?> method) {
         String id = text(reference, Method.ID);
@@ -75,6 +82,12 @@ public final class CatalogueComponent implements MethodCatalogue {
     @Reference(cardinality = ReferenceCardinality.MULTIPLE, policy = ReferencePolicy.DYNAMIC)
     void addInvariant(ServiceReference<Invariant<?>> reference, Invariant<?> invariant) {
         Bundle bundle = reference.getBundle();
+        Optional<String> fault = Definitions.fault(invariant);
+        if (fault.isPresent()) {
+            System.err.println("ropewalk: " + bundle.getSymbolicName() + " " + bundle.getVersion()
+                    + " defines an invariant " + fault.get() + "; it is left out until that is changed");
+            return;
+        }
         definitions.put(serviceId(reference), new Definition(serviceId(reference), invariant,
                 bundle.getSymbolicName() + " " + bundle.getVersion()));
         changed();

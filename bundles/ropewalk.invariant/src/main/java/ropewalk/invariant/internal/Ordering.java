@@ -42,6 +42,10 @@ final class Ordering {
         }
         List<CatalogueEntry> entries = new ArrayList<>();
         byInvariant.forEach((id, rivals) -> {
+            if (!first.containsKey(id)) {
+                undefined(id, rivals);
+                return;
+            }
             rivals.sort(BY_RANK);
             entries.add(new CatalogueEntry(id, Optional.ofNullable(first.get(id)), rivals));
         });
@@ -57,6 +61,15 @@ final class Ordering {
             System.err.println("ropewalk: " + definition.origin() + " defines '" + invariant.id()
                     + "' differently from the definition that was there first; the first one counts. Give the other an "
                     + "id of its own");
+        }
+    }
+
+    private void undefined(String id, List<RankedMethod> methods) {
+        for (RankedMethod method : methods) {
+            if (warned.add(method.id() + " " + method.origin())) {
+                System.err.println("ropewalk: " + method.origin() + " brings the method '" + method.id() + "' of '" + id
+                        + "', an invariant that nothing here defines; it is left out until a bundle defines it");
+            }
         }
     }
 

@@ -1,7 +1,6 @@
 package ropewalk.survey.internal;
 
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import ropewalk.collection.CsvRows;
@@ -70,19 +69,23 @@ final class BlockMeasurer {
     private String[] cells(Column column, Job job, ParsedBlock parsed, Clock clock, CsvRows rivalRows) {
         LinkBatch batch = parsed.batch();
         String[] texts = new String[batch.size()];
-        Outcome<?>[] filled = measurer.fill(column, batch, job.salvaged, clock);
-        for (int i = 0; i < texts.length; i++) {
-            texts[i] = CellText.of(filled[i]);
-        }
-        if (!column.rivals().isEmpty()) {
-            List<Clock> clocks = new ArrayList<>();
-            Map<RankedMethod, Outcome<?>[]> rivals = new LinkedHashMap<>(
-                    measurer.rivals(column, batch, job.salvaged, clocks));
+        if (column.rivals().isEmpty()) {
+            Outcome<?>[] filled = measurer.fill(column, batch, job.salvaged, clock);
             for (int i = 0; i < texts.length; i++) {
-                texts[i] = CellText.ofRivals(texts[i], rivals, i);
+                texts[i] = CellText.of(filled[i]);
             }
-            rivalRows(column, job, parsed, rivals, clocks, rivalRows);
+            return texts;
         }
+        List<Clock> clocks = new ArrayList<>();
+        Map<RankedMethod, Outcome<?>[]> rivals = measurer.rivals(column, batch, job.salvaged, clocks);
+        clocks.forEach(clock::add);
+        Outcome<?>[] first = rivals.get(column.fillers().get(0));
+        Outcome<?>[] filled = first == null ? measurer.fill(column, batch, job.salvaged, clock)
+                : measurer.fill(column, first, batch, clock);
+        for (int i = 0; i < texts.length; i++) {
+            texts[i] = CellText.ofRivals(CellText.of(filled[i]), rivals, i);
+        }
+        rivalRows(column, job, parsed, rivals, clocks, rivalRows);
         return texts;
     }
 

@@ -31,6 +31,13 @@ final class Clock {
         last = now;
     }
 
+    /** Adds what another clock of the same batch has counted. */
+    void add(Clock other) {
+        for (int i = 0; i < nanos.length; i++) {
+            nanos[i] += other.nanos[i];
+        }
+    }
+
     long micros(int link) {
         return (nanos[link] + 500) / 1000;
     }

@@ -34,7 +34,12 @@ final class ColumnMeasurer {
 
     /** For each link the outcome that fills its cell; null where the method's bundle was removed before. */
     Outcome<?>[] fill(Column column, LinkBatch batch, Map<String, Outcome<?>[]> salvaged, Clock clock) {
-        Outcome<?>[] cells = run(column, column.fillers().get(0), batch, salvaged, clock);
+        return fill(column, run(column, column.fillers().get(0), batch, salvaged, clock), batch, clock);
+    }
+
+    /** The same where the outcomes of the first filler are known. */
+    Outcome<?>[] fill(Column column, Outcome<?>[] first, LinkBatch batch, Clock clock) {
+        Outcome<?>[] cells = first.clone();
         for (int m = 1; m < column.fillers().size(); m++) {
             int[] open = inapplicable(cells);
             if (open.length == 0) {
@@ -103,13 +108,14 @@ final class ColumnMeasurer {
                 activity.nextCell();
                 cells[i] = accepted(column, outcome);
             });
-        } catch (RuntimeException | StackOverflowError | OutOfMemoryError | LinkageError | AssertionError e) {
+        } catch (Throwable e) {         // a guest may throw anything, checked exceptions and errors of its own too
             // The batch broke off: every link that has no outcome is measured by itself, so that the fault stays in
             // the cells it belongs to.
             oneByOne(column, method, batch, cells, clock);
         } finally {
             activity.end();
             thread.setContextClassLoader(before);
+            Thread.interrupted();       // a method that leaves its thread interrupted would end the worker
         }
         for (int i = 0; i < cells.length; i++) {
             if (cells[i] == null) {

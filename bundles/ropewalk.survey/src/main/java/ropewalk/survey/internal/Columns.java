@@ -5,6 +5,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.stream.Stream;
 import ropewalk.invariant.catalogue.CatalogueEntry;
 import ropewalk.invariant.catalogue.RankedMethod;
 import ropewalk.survey.Survey.RequestException;
@@ -42,6 +43,11 @@ record Columns(List<Column> measured, boolean hasVerdict) {
         }
         boolean wanted = (only.isEmpty() || only.contains(VERDICT)) && !skip.contains(VERDICT);
         return new Columns(columns, wanted && canDecide);
+    }
+
+    /** All methods that may be asked. */
+    Stream<RankedMethod> methods() {
+        return measured.stream().flatMap(column -> column.fillers().stream());
     }
 
     /** The columns that are here and not there; verdicts are given once. */

@@ -52,7 +52,7 @@ final class VerdictMeasurer {
         effort.restart();
         try {
             return new Cell(detection.decide(batch.link(i), effort), null);
-        } catch (RuntimeException | StackOverflowError | OutOfMemoryError | LinkageError | AssertionError e) {
+        } catch (Throwable e) {
             Outcome<?> failure = RankedMethod.failed(e);
             return new Cell(null, CellText.of(failure));
         }

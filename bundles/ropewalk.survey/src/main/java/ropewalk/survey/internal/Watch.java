@@ -17,7 +17,10 @@ final class Watch {
     private final double limitSeconds;
     private final Map<Worker, Seen> seen = new HashMap<>();
 
-    private record Seen(long cell, long processorNanos, long wallNanos) { }
+    /**
+     * What was seen of a cell: the clocks when it was first seen, and when its thread last used processor time.
+     */
+    private record Seen(long cell, long processorNanos, long wallNanos, long lastProcessorNanos, long lastWallNanos) { }
 
     Watch(double effortSeconds) {
         this.limitSeconds = effortSeconds + GRACE_SECONDS;
@@ -36,12 +39,20 @@ final class Watch {
         long wall = System.nanoTime();
         Seen before = seen.get(worker);
         if (before == null || before.cell() != cell) {
-            seen.put(worker, new Seen(cell, processor, wall));
+            seen.put(worker, new Seen(cell, processor, wall, processor, wall));
             return null;
         }
         boolean worked = (processor - before.processorNanos()) / 1e9 > limitSeconds;
-        boolean waited = (wall - before.wallNanos()) / 1e9 > limitSeconds && thread.getState() != Thread.State.RUNNABLE;
-        return worked || waited ? task : null;
+        boolean idle = 10 * (processor - before.processorNanos()) < wall - before.wallNanos();
+        boolean waited = idle && (wall - before.wallNanos()) / 1e9 > limitSeconds
+                && thread.getState() != Thread.State.RUNNABLE;
+        // A thread that waits in the operating system, for a pipe or another program, counts as running.
+        boolean still = processor == before.lastProcessorNanos();
+        boolean blocked = still && (wall - before.lastWallNanos()) / 1e9 > limitSeconds;
+        if (!still) {
+            seen.put(worker, new Seen(cell, before.processorNanos(), before.wallNanos(), processor, wall));
+        }
+        return worked || waited || blocked ? task : null;
     }
 
     void forget(Worker worker) {

@@ -104,6 +104,7 @@ final class Workers {
         watch.forget(hanging);
         Job orphan = hanging.abandon(task);
         if (benches.add(task)) {
+            columns.methods().filter(method -> method.id().equals(task)).forEach(catalogue::setAside);
             listener.message("'" + task + "' did not stop at its effort of " + request.effortSeconds()
                     + " s and is not asked again in this survey; raise --effort or leave it out with --skip " + task);
         }

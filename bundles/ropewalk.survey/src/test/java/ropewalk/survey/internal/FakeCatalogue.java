@@ -19,6 +19,7 @@ import ropewalk.invariant.catalogue.RankedMethod;
 final class FakeCatalogue implements MethodCatalogue {
 
     private final List<CatalogueEntry> entries = new CopyOnWriteArrayList<>();
+    private final List<String> setAside = new CopyOnWriteArrayList<>();
 
     interface Measure {
         Outcome<IntegerValue> of(LinkDiagram link, Effort effort);
@@ -54,5 +55,15 @@ final class FakeCatalogue implements MethodCatalogue {
     @Override
     public boolean isInstalled(RankedMethod method) {
         return entries.stream().anyMatch(entry -> entry.methods().contains(method));
+    }
+
+    /** Tests look at what the survey itself does with a method that hangs. */
+    @Override
+    public void setAside(RankedMethod method) {
+        setAside.add(method.id());
+    }
+
+    List<String> setAside() {
+        return setAside;
     }
 }

@@ -147,6 +147,7 @@ class SurveyRunTest {
         assertTrue(rows.get(3).startsWith("t3,braid,1,3,3,!effort: hangs.a hung"), rows.get(3));
         assertTrue(rows.get(600).startsWith("t600,braid,2,600,600,!effort: hangs.a"), rows.get(600));
         assertEquals(1, messages.stream().filter(m -> m.contains("'hangs.a' did not stop")).count());
+        assertEquals(List.of("hangs.a"), catalogue.setAside());
     }
 
     private static void sleepForGood() {

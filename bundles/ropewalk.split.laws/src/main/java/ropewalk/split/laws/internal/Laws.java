@@ -2,6 +2,8 @@ package ropewalk.split.laws.internal;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
+import java.util.concurrent.ConcurrentHashMap;
 import ropewalk.invariant.Invariant;
 import ropewalk.invariant.catalogue.CatalogueEntry;
 import ropewalk.invariant.catalogue.MethodCatalogue;
@@ -12,6 +14,7 @@ final class Laws {
     private record Snapshot(List<CatalogueEntry> entries, List<Law> laws) { }
 
     private final MethodCatalogue catalogue;
+    private final Set<String> broken = ConcurrentHashMap.newKeySet();
     private volatile Snapshot snapshot = new Snapshot(List.of(), List.of());
 
     Laws(MethodCatalogue catalogue) {
@@ -28,10 +31,10 @@ final class Laws {
         return known.laws();
     }
 
-    private static List<Law> lawsOf(List<CatalogueEntry> entries) {
+    private List<Law> lawsOf(List<CatalogueEntry> entries) {
         List<Law> laws = new ArrayList<>();
         for (CatalogueEntry entry : entries) {
-            entry.definition().flatMap(Invariant::splitLaw).ifPresent(rule -> laws.add(Law.of(entry, rule)));
+            entry.definition().flatMap(Invariant::splitLaw).ifPresent(rule -> laws.add(Law.of(entry, rule, broken)));
         }
         return laws;
     }

@@ -72,7 +72,7 @@ public final class WholeLinkObstructionComponent implements Obstruction {
             findings.together(Partition.whole(link.components()), evidence(law, measured.get()));
             return;
         }
-        Set<Pair> ties = law.ties(measured.get().value());
+        Set<Pair> ties = law.ties(measured.get().value(), link.components());
         if (!ties.isEmpty()) {
             findings.together(joined(ties, link.components()), evidence(law, measured.get()));
         }
