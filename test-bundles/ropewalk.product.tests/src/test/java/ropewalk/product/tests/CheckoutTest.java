@@ -118,7 +118,7 @@ class CheckoutTest {
     @Test
     void severalFirstRunsMakeOneBuildWithoutFlock() throws IOException {
         Path tools = Files.createDirectories(scratch.resolve("tools"));
-        for (String tool : List.of("bash", "dirname", "readlink", "find", "cksum", "sort", "tr", "mkdir", "cat", "rm", "mv",
+        for (String tool : List.of("bash", "dirname", "readlink", "find", "cksum", "sort", "tr", "mkdir", "rmdir", "cat", "rm", "mv",
                 "cp", "sleep", "grep", "chmod", "tail", "env", "java")) {
             Files.createSymbolicLink(tools.resolve(tool), onThePath(tool));
         }
