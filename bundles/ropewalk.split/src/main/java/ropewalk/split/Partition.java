@@ -1,6 +1,7 @@
 package ropewalk.split;
 
 import java.util.Arrays;
+import java.util.function.IntUnaryOperator;
 
 /**
  * A partition of the components of a link. Classes are numbered from 0 by their smallest component. Immutable.
@@ -22,22 +23,22 @@ public final class Partition {
      * @return the partition
      */
     public static Partition of(int... marks) {
-        int[] classOf = new int[marks.length];
-        int[] first = new int[marks.length];
-        int[] order = new int[marks.length];
-        int classes = 0;
-        // Marks may be any numbers; a component looks for the earlier ones with its mark by sorting once.
-        Integer[] byMark = new Integer[marks.length];
-        Arrays.setAll(byMark, i -> i);
-        Arrays.sort(byMark, (a, b) -> marks[a] != marks[b] ? Integer.compare(marks[a], marks[b]) : Integer.compare(a, b));
-        for (int i = 0; i < byMark.length; i++) {
-            first[byMark[i]] = i > 0 && marks[byMark[i]] == marks[byMark[i - 1]] ? first[byMark[i - 1]] : byMark[i];
+        int n = marks.length;
+        // Sorted by mark, then by component: equal marks stand together, their first component in front.
+        long[] sorted = new long[n];
+        for (int i = 0; i < n; i++) {
+            sorted[i] = (long) marks[i] << 32 | i;
         }
-        for (int i = 0; i < marks.length; i++) {
-            if (first[i] == i) {
-                order[i] = classes++;
-            }
-            classOf[i] = order[first[i]];
+        Arrays.sort(sorted);
+        int[] first = new int[n];
+        for (int k = 0; k < n; k++) {
+            boolean same = k > 0 && sorted[k] >> 32 == sorted[k - 1] >> 32;
+            first[(int) sorted[k]] = same ? first[(int) sorted[k - 1]] : (int) sorted[k];
+        }
+        int[] classOf = new int[n];
+        int classes = 0;
+        for (int i = 0; i < n; i++) {
+            classOf[i] = first[i] == i ? classes++ : classOf[first[i]];
         }
         return new Partition(classOf, classes);
     }
@@ -152,21 +153,35 @@ public final class Partition {
      * @return one line
      */
     public String text() {
-        if (classes == 1 && classOf.length == 1) {
-            return "[[1]]";
+        return text(i -> i + 1);
+    }
+
+    /**
+     * The same with other numbers.
+     *
+     * @param numbers what to write for each component, counted from 0
+     * @return one line
+     */
+    public String text(IntUnaryOperator numbers) {
+        int[] begin = new int[classes + 1];
+        for (int c : classOf) {
+            begin[c + 1]++;
         }
-        StringBuilder[] lists = new StringBuilder[classes];
+        for (int c = 0; c < classes; c++) {
+            begin[c + 1] += begin[c];
+        }
+        int[] next = begin.clone();
+        int[] byClass = new int[classOf.length];
         for (int i = 0; i < classOf.length; i++) {
-            StringBuilder list = lists[classOf[i]];
-            if (list == null) {
-                lists[classOf[i]] = new StringBuilder("[").append(i + 1);
-            } else {
-                list.append(',').append(i + 1);
-            }
+            byClass[next[classOf[i]]++] = i;
         }
         StringBuilder out = new StringBuilder("[");
         for (int c = 0; c < classes; c++) {
-            out.append(c == 0 ? "" : ",").append(lists[c]).append(']');
+            out.append(c == 0 ? "[" : ",[");
+            for (int k = begin[c]; k < begin[c + 1]; k++) {
+                out.append(k == begin[c] ? "" : ",").append(numbers.applyAsInt(byClass[k]));
+            }
+            out.append(']');
         }
         return out.append(']').toString();
     }

@@ -1,5 +1,6 @@
 package ropewalk.split;
 
+import java.util.Arrays;
 import java.util.List;
 import ropewalk.diagram.LinkDiagram;
 
@@ -21,10 +22,10 @@ public record Verdict(Partition together, Partition apart, List<Argument> argume
     }
 
     /**
-     * One piece of evidence and what it says of the whole link.
+     * One piece of evidence and what it says.
      *
      * @param isApart true for a witness, false for an obstruction
-     * @param classes its partition of the components of the whole link
+     * @param classes the partition it claims of the components of the diagram that it speaks of
      * @param evidence the argument
      * @param diagram the diagram that the evidence speaks of: the given one, or after a separation one of its parts
      * @param components the number in the whole link of each component of that diagram, counted from 0
@@ -35,6 +36,32 @@ public record Verdict(Partition together, Partition apart, List<Argument> argume
         // Keeps a copy.
         public Argument {
             components = List.copyOf(components);
+        }
+
+        /**
+         * The claim as a JSON list of lists of component numbers of the whole link, counted from 1; components that the
+         * argument does not speak of are missing.
+         *
+         * @return one line
+         */
+        public String claim() {
+            return classes.text(i -> components.get(i) + 1);
+        }
+
+        /**
+         * What the argument alone says of all components: those it does not speak of are not told apart by a witness, and
+         * not called inseparable by an obstruction.
+         *
+         * @param size the number of components of the whole link
+         * @return a partition of all of them
+         */
+        public Partition ofWhole(int size) {
+            int[] marks = new int[size];
+            Arrays.setAll(marks, i -> isApart ? -1 : classes.classes() + i);
+            for (int i = 0; i < components.size(); i++) {
+                marks[components.get(i)] = classes.classOf(i);
+            }
+            return Partition.of(marks);
         }
     }
 

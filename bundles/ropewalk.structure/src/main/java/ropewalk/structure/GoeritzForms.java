@@ -30,6 +30,8 @@ public final class GoeritzForms {
     private final int[] indexOfRegion;      // within its piece, -1 for shaded regions
     private final int[] dimension;          // unshaded regions of each piece
     private final int[] correction;
+    private final int[] firstCrossing;      // where each piece begins in crossings
+    private final int[] crossings;
 
     private GoeritzForms(LinkDiagram diagram, Shading shading) {
         this.diagram = diagram;
@@ -39,6 +41,9 @@ public final class GoeritzForms {
         this.indexOfRegion = new int[regions.count()];
         this.dimension = new int[pieces.withCrossings()];
         this.correction = new int[pieces.withCrossings()];
+        this.firstCrossing = new int[pieces.withCrossings() + 1];
+        this.crossings = new int[diagram.crossings()];
+        sortCrossings();
         Arrays.fill(indexOfRegion, -1);
         for (int d = 0; d < diagram.darts(); d++) {
             int r = regions.ofCorner(d);
@@ -51,6 +56,20 @@ public final class GoeritzForms {
             if (diagram.isOutgoing(shaded) == diagram.isOutgoing(LinkDiagram.counterClockwise(shaded))) {
                 correction[pieces.ofCrossing(c)] += chessboardSign(c);
             }
+        }
+    }
+
+    /** By piece, in one pass: a diagram may have as many pieces as crossings. */
+    private void sortCrossings() {
+        for (int c = 0; c < crossings.length; c++) {
+            firstCrossing[pieces.ofCrossing(c) + 1]++;
+        }
+        for (int p = 1; p < firstCrossing.length; p++) {
+            firstCrossing[p] += firstCrossing[p - 1];
+        }
+        int[] next = firstCrossing.clone();
+        for (int c = 0; c < crossings.length; c++) {
+            crossings[next[pieces.ofCrossing(c)]++] = c;
         }
     }
 
@@ -144,28 +163,7 @@ public final class GoeritzForms {
     public void fillReduced(int piece, long[] target) {
         int n = dimension[piece] - 1;
         Arrays.fill(target, 0, n * n, 0);
-        for (int c = 0; c < diagram.crossings(); c++) {
-            if (pieces.ofCrossing(c) != piece) {
-                continue;
-            }
-            int first = firstUnshaded(c);
-            int u = indexOfRegion[shading.regions().ofCorner(first)];
-            int v = indexOfRegion[shading.regions().ofCorner(first ^ 2)];
-            if (u == v) {
-                continue;
-            }
-            int sign = chessboardSign(c);
-            if (u < n && v < n) {
-                target[u * n + v] += sign;
-                target[v * n + u] += sign;
-            }
-            if (u < n) {
-                target[u * n + u] -= sign;
-            }
-            if (v < n) {
-                target[v * n + v] -= sign;
-            }
-        }
+        addUp(piece, n, (i, j, value) -> target[i * n + j] += value);
     }
 
     /**
@@ -190,10 +188,18 @@ public final class GoeritzForms {
 
     private IntegerMatrix matrix(int piece, int n) {
         IntegerMatrix.Builder matrix = IntegerMatrix.builder(n, n);
-        for (int c = 0; c < diagram.crossings(); c++) {
-            if (pieces.ofCrossing(c) != piece) {
-                continue;
-            }
+        addUp(piece, n, matrix::add);
+        return matrix.build();
+    }
+
+    private interface Entries {
+        void add(int row, int column, long value);
+    }
+
+    /** What each crossing of a piece adds to the first n rows and columns of its unreduced form. */
+    private void addUp(int piece, int n, Entries entries) {
+        for (int at = firstCrossing[piece]; at < firstCrossing[piece + 1]; at++) {
+            int c = crossings[at];
             int first = firstUnshaded(c);
             int u = indexOfRegion[shading.regions().ofCorner(first)];
             int v = indexOfRegion[shading.regions().ofCorner(first ^ 2)];
@@ -202,17 +208,16 @@ public final class GoeritzForms {
             }
             int sign = chessboardSign(c);
             if (u < n && v < n) {
-                matrix.add(u, v, sign);
-                matrix.add(v, u, sign);
+                entries.add(u, v, sign);
+                entries.add(v, u, sign);
             }
             if (u < n) {
-                matrix.add(u, u, -sign);
+                entries.add(u, u, -sign);
             }
             if (v < n) {
-                matrix.add(v, v, -sign);
+                entries.add(v, v, -sign);
             }
         }
-        return matrix.build();
     }
 
     private int firstUnshaded(int crossing) {

@@ -17,7 +17,7 @@ import java.util.concurrent.TimeUnit;
  * when the test wants to do something meanwhile, {@link #start}.
  */
 public final class Run {
-    private static final long LIMIT_SECONDS = 60;
+    private static final long LIMIT_SECONDS = 180;
 
     private final Path launcher;
     private final Path scratch;

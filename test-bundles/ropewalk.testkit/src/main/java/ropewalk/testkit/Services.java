@@ -11,7 +11,7 @@ import org.osgi.util.tracker.ServiceTracker;
 
 /** Waits, with a bound, for what a framework does in its own time. */
 public final class Services {
-    private static final Duration LIMIT = Duration.ofSeconds(5);
+    private static final Duration LIMIT = Duration.ofSeconds(60);
 
     private final BundleContext context;
 
@@ -45,7 +45,7 @@ public final class Services {
      * @param type its type
      * @param properties a filter over its properties, such as {@code (ropewalk.method=x)}, or the empty text for any
      * @return the service
-     * @throws AssertionError when none comes within 5 s; the message names the bundles that are not active
+     * @throws AssertionError when none comes within a minute; the message names the bundles that are not active
      */
     public <S> S await(Class<S> type, String properties) {
         try {
@@ -89,7 +89,7 @@ public final class Services {
      *
      * @param what it in words, for the message
      * @param holds asked every 20 ms
-     * @throws AssertionError when it does not hold within 5 s
+     * @throws AssertionError when it does not hold within a minute
      */
     public static void until(String what, BooleanSupplier holds) {
         long end = System.nanoTime() + LIMIT.toNanos();

@@ -102,7 +102,7 @@ final class LinkSheet {
             line("  a link of one component has nothing to come apart");
         }
         for (Verdict.Argument argument : verdict.arguments()) {
-            line("  " + (argument.isApart() ? "apart    " : "together ") + argument.classes().text() + " by "
+            line("  " + (argument.isApart() ? "apart    " : "together ") + argument.claim() + " by "
                     + argument.evidence().kind() + " (" + argument.evidence().grade() + ")");
             line("           " + Visible.text(argument.evidence().detail()));
         }

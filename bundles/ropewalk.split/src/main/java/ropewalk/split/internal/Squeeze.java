@@ -29,18 +29,20 @@ final class Squeeze {
     private final Set<String> tried = new LinkedHashSet<>();
     private final Deque<Part> open = new ArrayDeque<>();
     private final int[] piece;
-    private Partition together;
+    /** A forest over the components: those of one tree are proved inseparable. */
+    private final int[] tied;
     private int pieces = 1;
 
     Squeeze(LinkDiagram link, List<Stage> stages, Effort effort) {
         this.stages = stages;
         this.effort = effort;
         this.components = link.components();
-        this.together = Partition.singles(components);
+        this.tied = new int[components];
+        Arrays.setAll(tied, i -> i);
         this.piece = new int[components];
         int[] all = new int[components];
         Arrays.setAll(all, i -> i);
-        open.push(new Part(link, all, together));
+        open.push(new Part(link, all, Partition.singles(components)));
     }
 
     Verdict run() {
@@ -52,7 +54,18 @@ final class Squeeze {
         } catch (Effort.SpentException e) {
             limit = e.getMessage();
         }
-        return new Verdict(together, Partition.of(piece), arguments, new ArrayList<>(tried), limit);
+        int[] together = new int[components];
+        Arrays.setAll(together, this::root);
+        return new Verdict(Partition.of(together), Partition.of(piece), arguments, new ArrayList<>(tried), limit);
+    }
+
+    private int root(int component) {
+        int r = component;
+        while (tied[r] != r) {
+            tied[r] = tied[tied[r]];
+            r = tied[r];
+        }
+        return r;
     }
 
     /** A sublink that is not known to come apart, with the numbers its components have in the whole link. */
@@ -92,14 +105,30 @@ final class Squeeze {
             }
             requireConnected(classes, evidence);
             known = joined;
-            int[] marks = new int[components];
-            Arrays.setAll(marks, i -> numbers.length + i);
+            arguments.add(argument(false, classes, evidence));
+            int[] representative = new int[classes.classes()];
+            Arrays.fill(representative, -1);
             for (int i = 0; i < numbers.length; i++) {
-                marks[numbers[i]] = classes.classOf(i);
+                int c = classes.classOf(i);
+                if (representative[c] < 0) {
+                    representative[c] = numbers[i];
+                } else {
+                    tied[root(numbers[i])] = root(representative[c]);
+                }
             }
-            Partition lifted = Partition.of(marks);
-            arguments.add(argument(false, lifted, evidence));
-            together = together.join(lifted);
+        }
+
+        /** The part with some of this part's components, with what is known of them. */
+        private Part part(LinkDiagram diagram, List<Integer> chosen) {
+            boolean[] keep = new boolean[numbers.length];
+            int[] inside = new int[chosen.size()];
+            int[] marks = new int[chosen.size()];
+            for (int i = 0; i < inside.length; i++) {
+                keep[chosen.get(i)] = true;
+                inside[i] = numbers[chosen.get(i)];
+                marks[i] = known.classOf(chosen.get(i));
+            }
+            return new Part(diagram.sublink(keep), inside, Partition.of(marks));
         }
 
         private Verdict.Argument argument(boolean isApart, Partition classes, Evidence evidence) {
@@ -131,26 +160,31 @@ final class Squeeze {
                         + found + " by " + evidence.kind() + "; one of the two arguments is wrong");
             }
             separated = true;
-            int[] marks = new int[components];
-            Arrays.fill(marks, -1);
-            for (int c = found.classes() - 1; c >= 0; c--) {
-                boolean[] members = found.members(c);
-                int[] inside = new int[numbers.length];
-                int[] classes = new int[numbers.length];
-                int count = 0;
-                int mark = c == 0 ? piece[numbers[0]] : pieces++;
-                for (int i = 0; i < numbers.length; i++) {
-                    if (members[i]) {
-                        classes[count] = known.classOf(i);
-                        inside[count++] = numbers[i];
-                        piece[numbers[i]] = mark;
-                    }
-                    marks[numbers[i]] = found.classOf(i);
-                }
-                open.push(new Part(diagram.sublink(members), Arrays.copyOf(inside, count),
-                        Partition.of(Arrays.copyOf(classes, count))));
+            arguments.add(argument(true, found, evidence));
+            int[] sizes = new int[found.classes()];
+            for (int i = 0; i < numbers.length; i++) {
+                sizes[found.classOf(i)]++;
             }
-            arguments.add(argument(true, Partition.of(marks), evidence));
+            int[] marks = new int[sizes.length];
+            List<List<Integer>> parts = new ArrayList<>();
+            for (int c = 0; c < sizes.length; c++) {
+                marks[c] = c == 0 ? piece[numbers[0]] : pieces++;
+                // A single component has nothing to come apart.
+                parts.add(sizes[c] > 1 ? new ArrayList<>(sizes[c]) : null);
+            }
+            for (int i = 0; i < numbers.length; i++) {
+                int c = found.classOf(i);
+                piece[numbers[i]] = marks[c];
+                if (parts.get(c) != null) {
+                    parts.get(c).add(i);
+                }
+            }
+            for (int c = sizes.length - 1; c >= 0; c--) {
+                if (parts.get(c) != null) {
+                    effort.checkpoint();
+                    open.push(part(diagram, parts.get(c)));
+                }
+            }
         }
     }
 }

@@ -3,6 +3,7 @@ package ropewalk.survey.internal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import ropewalk.collection.CsvRows;
 import ropewalk.collection.RecordBlock;
 import ropewalk.diagram.LinkBatch;
@@ -42,7 +43,7 @@ final class BlockMeasurer {
         for (Column column : columns.measured()) {
             cells.add(cells(column, job, parsed, clock, rivalRows));
         }
-        VerdictMeasurer.Cell[] decided = columns.hasVerdict() ? verdicts.decide(batch, clock) : null;
+        VerdictMeasurer.Cell[] decided = columns.hasVerdict() ? verdicts.decide(batch, job.hungVerdicts, clock) : null;
         failedCells = 0;
         CsvRows rows = new CsvRows();
         for (int i = 0; i < batch.size(); i++) {
@@ -68,12 +69,17 @@ final class BlockMeasurer {
 
     private String[] cells(Column column, Job job, ParsedBlock parsed, Clock clock, CsvRows rivalRows) {
         LinkBatch batch = parsed.batch();
-        String[] texts = new String[batch.size()];
+        String[] texts = job.finishedCells.get(column.id());
+        if (texts != null) {
+            return texts;
+        }
+        texts = new String[batch.size()];
         if (column.rivals().isEmpty()) {
             Outcome<?>[] filled = measurer.fill(column, batch, job.salvaged, clock);
             for (int i = 0; i < texts.length; i++) {
                 texts[i] = CellText.of(filled[i]);
             }
+            job.finishedCells.put(column.id(), texts);
             return texts;
         }
         List<Clock> clocks = new ArrayList<>();
@@ -123,12 +129,9 @@ final class BlockMeasurer {
                 .field(together.text()).field(kinds(verdict));
     }
 
+    /** Each kind and grade once; evidence.jsonl has every argument. */
     private static String kinds(Verdict verdict) {
-        StringBuilder out = new StringBuilder();
-        for (Verdict.Argument argument : verdict.arguments()) {
-            out.append(out.isEmpty() ? "" : ";").append(argument.evidence().kind()).append(':')
-                    .append(argument.evidence().grade());
-        }
-        return out.toString();
+        return verdict.arguments().stream().map(a -> a.evidence().kind() + ":" + a.evidence().grade()).distinct()
+                .collect(Collectors.joining(";"));
     }
 }

@@ -12,7 +12,7 @@ import ropewalk.split.Verdict;
  * Lines of evidence.jsonl, one for each argument: {@code format} (1), {@code link} (its name), {@code code} (planar code of
  * the diagram that the argument speaks of), {@code numbers} (the numbers in the link of that diagram's components; all of
  * them until a separation leaves parts), {@code claim} ({@code together} or {@code apart}), {@code components} (the
- * partition that is claimed, in the link's numbers), {@code kind}, {@code grade}, {@code argument}.
+ * classes that are claimed, in the link's numbers), {@code kind}, {@code grade}, {@code argument}.
  */
 final class EvidenceLines {
 
@@ -30,7 +30,7 @@ final class EvidenceLines {
                     .append(argument.diagram() == link ? code : planar.write(argument.diagram()))
                     .append("\",\"numbers\":").append(numbers(argument))
                     .append(",\"claim\":\"").append(argument.isApart() ? "apart" : "together")
-                    .append("\",\"components\":").append(argument.classes().text())
+                    .append("\",\"components\":").append(argument.claim())
                     .append(",\"kind\":").append(ValueText.quoted(argument.evidence().kind()))
                     .append(",\"grade\":").append(ValueText.quoted(argument.evidence().grade()))
                     .append(",\"argument\":").append(argument.evidence().detail()).append("}\n");

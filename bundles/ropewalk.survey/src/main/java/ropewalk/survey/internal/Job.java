@@ -1,6 +1,7 @@
 package ropewalk.survey.internal;
 
 import java.util.Map;
+import java.util.Set;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ConcurrentHashMap;
 import ropewalk.collection.RecordBlock;
@@ -18,6 +19,12 @@ final class Job {
 
     /** Outcomes that an abandoned attempt had reached, by method id. */
     final Map<String, Outcome<?>[]> salvaged = new ConcurrentHashMap<>();
+
+    /** Cells that an abandoned attempt had finished, by column. */
+    final Map<String, String[]> finishedCells = new ConcurrentHashMap<>();
+
+    /** Links of the batch whose verdict hung. */
+    final Set<Integer> hungVerdicts = ConcurrentHashMap.newKeySet();
 
     Job(RecordBlock block, int[] keptFields) {
         this.block = block;

@@ -1,5 +1,6 @@
 package ropewalk.survey.internal;
 
+import java.util.Set;
 import ropewalk.diagram.LinkBatch;
 import ropewalk.invariant.Effort;
 import ropewalk.invariant.catalogue.RankedMethod;
@@ -14,13 +15,12 @@ final class VerdictMeasurer {
     static final String TASK = "verdict";
 
     private final SplitDetection detection;
-    private final Benches benches;
     private final Activity activity;
     private final Effort effort;
+    private volatile int current;
 
-    VerdictMeasurer(SplitDetection detection, Benches benches, Activity activity, Effort effort) {
+    VerdictMeasurer(SplitDetection detection, Activity activity, Effort effort) {
         this.detection = detection;
-        this.benches = benches;
         this.activity = activity;
         this.effort = effort;
     }
@@ -33,19 +33,24 @@ final class VerdictMeasurer {
      */
     record Cell(Verdict verdict, String fault) { }
 
-    Cell[] decide(LinkBatch batch, Clock clock) {
+    Cell[] decide(LinkBatch batch, Set<Integer> hung, Clock clock) {
         Cell[] cells = new Cell[batch.size()];
         clock.begin();
         activity.begin(TASK);
         for (int i = 0; i < cells.length; i++) {
-            cells[i] = benches.holds(TASK)
-                    ? new Cell(null, "!effort: the verdict hung and is not asked for again in this survey")
+            current = i;
+            cells[i] = hung.contains(i) ? new Cell(null, "!effort: the verdict did not stop at its effort")
                     : decide(batch, i);
             clock.tick(i);
             activity.nextCell();
         }
         activity.end();
         return cells;
+    }
+
+    /** The link whose verdict is sought now; for the watch. */
+    int current() {
+        return current;
     }
 
     private Cell decide(LinkBatch batch, int i) {

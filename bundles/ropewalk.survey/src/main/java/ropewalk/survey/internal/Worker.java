@@ -12,16 +12,19 @@ final class Worker implements Runnable {
     private final BlockingQueue<Job> jobs;
     private final BlockMeasurer blocks;
     private final ColumnMeasurer columns;
+    private final VerdictMeasurer verdicts;
     private final Activity activity;
     private final Effort effort;
     private volatile Job job;
     private volatile boolean abandoned;
     private volatile Thread thread;
 
-    Worker(BlockingQueue<Job> jobs, BlockMeasurer blocks, ColumnMeasurer columns, Activity activity, Effort effort) {
+    Worker(BlockingQueue<Job> jobs, BlockMeasurer blocks, ColumnMeasurer columns,
+            VerdictMeasurer verdicts, Activity activity, Effort effort) {
         this.jobs = jobs;
         this.blocks = blocks;
         this.columns = columns;
+        this.verdicts = verdicts;
         this.activity = activity;
         this.effort = effort;
     }
@@ -58,7 +61,12 @@ final class Worker implements Runnable {
         abandoned = true;
         effort.cancel();
         Job orphan = job;
-        if (orphan != null && columns.current() != null) {
+        if (orphan == null) {
+            return null;
+        }
+        if (task.equals(VerdictMeasurer.TASK)) {
+            orphan.hungVerdicts.add(verdicts.current());
+        } else if (columns.current() != null) {
             orphan.salvaged.put(task, columns.current().clone());
         }
         return orphan;

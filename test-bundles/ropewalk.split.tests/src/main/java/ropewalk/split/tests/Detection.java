@@ -88,14 +88,14 @@ final class Detection {
         Partition together = Partition.singles(components);
         int[] apart = new int[components];
         for (Verdict.Argument argument : verdict.arguments()) {
-            assertEquals(components, argument.classes().size());
+            assertEquals(components, argument.ofWhole(components).size());
             if (argument.isApart()) {
                 for (int i = 0; i < components; i++) {
-                    apart[i] = apart[i] * components + argument.classes().classOf(i);
+                    apart[i] = apart[i] * components + argument.ofWhole(components).classOf(i);
                 }
                 apart = marks(Partition.of(apart));
             } else {
-                together = together.join(argument.classes());
+                together = together.join(argument.ofWhole(components));
             }
         }
         assertEquals(together, verdict.together(), "together is the join of the arguments");

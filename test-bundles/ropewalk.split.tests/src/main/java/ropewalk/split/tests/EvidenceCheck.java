@@ -47,7 +47,7 @@ final class EvidenceCheck {
                 apart(argument);
             } else {
                 together(argument);
-                together = together.join(argument.classes());
+                together = together.join(argument.ofWhole(together.size()));
             }
         }
     }
@@ -61,12 +61,12 @@ final class EvidenceCheck {
     }
 
     private void apart(Verdict.Argument argument) {
-        List<Part> cut = parts.stream().filter(p -> cuts(argument.classes(), p.numbers())
-                && p.numbers().stream().noneMatch(i -> sharesClassOutside(argument.classes(), i, p))).toList();
-        assertEquals(1, cut.size(), () -> "the separation " + argument.classes() + " cuts one part of " + parts);
+        List<Part> cut = parts.stream().filter(p -> cuts(argument.ofWhole(together.size()), p.numbers())
+                && p.numbers().stream().noneMatch(i -> sharesClassOutside(argument.ofWhole(together.size()), i, p))).toList();
+        assertEquals(1, cut.size(), () -> "the separation " + argument.ofWhole(together.size()) + " cuts one part of " + parts);
         Part part = cut.get(0);
         assertSpeaksOf(part, argument);
-        Partition claimed = restricted(argument.classes(), part.numbers());
+        Partition claimed = restricted(argument.ofWhole(together.size()), part.numbers());
         Map<?, ?> detail = JsonTree.object(argument.evidence().detail());
         assertEquals(claimed.text(), compact(detail.get("pieces")), "pieces in the evidence");
         LinkDiagram loose = part.diagram();
@@ -133,7 +133,7 @@ final class EvidenceCheck {
     }
 
     private void together(Verdict.Argument argument) {
-        Partition classes = argument.classes();
+        Partition classes = argument.ofWhole(together.size());
         List<Part> touched = parts.stream().filter(p -> p.numbers().stream().anyMatch(i -> p.numbers().stream()
                 .anyMatch(j -> !i.equals(j) && classes.classOf(i) == classes.classOf(j)))).toList();
         assertEquals(1, touched.size(), () -> classes + " ties components of one part of " + parts);

@@ -1,5 +1,8 @@
 package ropewalk.invariant.chessboard.internal;
 
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import org.osgi.service.component.annotations.Component;
 import ropewalk.invariant.Bipartition;
@@ -15,7 +18,9 @@ public final class FactorsInvariantComponent extends InvariantBase<IntegerList> 
     private static final SplitLaw<IntegerList> LAW = new SplitLaw<>() {
         @Override
         public IntegerList union(IntegerList left, IntegerList right, Bipartition which) {
-            return new IntegerList(DirectSum.of(left.values(), right.values(), 1));
+            List<BigInteger> orders = new ArrayList<>(left.values());
+            orders.addAll(right.values());
+            return new IntegerList(DirectSum.of(orders, 1, () -> { }));
         }
 
         @Override

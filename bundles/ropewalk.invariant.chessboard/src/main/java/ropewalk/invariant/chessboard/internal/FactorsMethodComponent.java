@@ -24,13 +24,15 @@ public final class FactorsMethodComponent implements Method<IntegerList> {
     @Override
     public Outcome<IntegerList> measure(LinkDiagram link, Effort effort) {
         GoeritzForms forms = GoeritzForms.of(link);
-        List<BigInteger> factors = List.of();
-        for (int p = 0; p < forms.count(); p++) {
-            List<BigInteger> more = ofPiece(forms, p, effort);
-            factors = p == 0 ? more : DirectSum.of(factors, more, 0);
+        int pieces = ConnectedPieces.of(link).count();
+        if (pieces == 1 && forms.count() == 1) {
+            return new Outcome.Exact<>(new IntegerList(ofPiece(forms, 0, effort)));
         }
-        int free = ConnectedPieces.of(link).count() - 1;
-        return new Outcome.Exact<>(new IntegerList(free == 0 ? factors : DirectSum.of(factors, List.of(), free)));
+        List<BigInteger> cyclic = new ArrayList<>();
+        for (int p = 0; p < forms.count(); p++) {
+            cyclic.addAll(ofPiece(forms, p, effort));
+        }
+        return new Outcome.Exact<>(new IntegerList(DirectSum.of(cyclic, pieces - 1, effort::checkpoint)));
     }
 
     private static List<BigInteger> ofPiece(GoeritzForms forms, int piece, Effort effort) {
