@@ -31,6 +31,22 @@ class DeterminantTest {
         assertThrows(IllegalArgumentException.class, () -> Determinant.of(IntegerMatrix.builder(2, 3).build(), NONE));
     }
 
+    /** Rows of 2^62 (J - I) add to 2^64, which wraps to 0; the eigenvalues of J - I are 4 and four times -1. */
+    @Test
+    void rowSumsThatWrapAround() {
+        for (long w : new long[] {1L << 62, -1L << 62}) {
+            IntegerMatrix.Builder builder = IntegerMatrix.builder(5, 5);
+            for (int i = 0; i < 5; i++) {
+                for (int j = 0; j < 5; j++) {
+                    builder.add(i, j, i == j ? 0 : w);
+                }
+            }
+            IntegerMatrix m = builder.build();
+            check(m);
+            assertEquals(BigInteger.valueOf(4).multiply(BigInteger.valueOf(w).pow(5)), Determinant.of(m, NONE));
+        }
+    }
+
     @Test
     void smallOnes() {
         Random random = new Random(SEED);

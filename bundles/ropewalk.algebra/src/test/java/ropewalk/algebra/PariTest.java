@@ -106,9 +106,22 @@ class PariTest {
         return all;
     }
 
+    private static List<IntegerMatrix> adversaries(int from, int... sizes) {
+        Random random = new Random(SEED);
+        List<IntegerMatrix> all = new ArrayList<>();
+        for (int kind = from; kind < Adversaries.KINDS; kind++) {
+            for (int n : sizes) {
+                all.add(Adversaries.square(kind, n, random));
+            }
+        }
+        return all;
+    }
+
     @Test
     void determinants() throws IOException {
-        compare(squares(), "matdet(m)", (m, theirs) -> Determinant.of(m, NONE).toString());
+        List<IntegerMatrix> all = squares();
+        all.addAll(adversaries(0, 27, 50));
+        compare(all, "matdet(m)", (m, theirs) -> Determinant.of(m, NONE).toString());
     }
 
     @Test
@@ -118,6 +131,7 @@ class PariTest {
         for (int c = 0; c < 40; c++) {
             all.add(Samples.ofRank(1 + random.nextInt(60), 1 + random.nextInt(60), random.nextInt(40), random));
         }
+        all.addAll(adversaries(0, 33, 40));
         compare(all, "matrank(m)", (m, theirs) -> Integer.toString(Rank.of(m, NONE)));
     }
 
@@ -137,6 +151,7 @@ class PariTest {
             all.add(Samples.ofRank(n, n, n - random.nextInt(4), random));
             all.add(Samples.any(n, n, 2.5 / n, 6, random));
         }
+        all.addAll(adversaries(0, 10, 21));
         compare(all, "matsnf(m)", (m, theirs) -> {
             List<BigInteger> factors = new ArrayList<>(InvariantFactors.of(m, NONE));
             while (factors.size() < m.columns()) {
@@ -163,6 +178,7 @@ class PariTest {
         for (int side = 3; side < 13; side++) {
             all.add(Samples.planarLaplacian(side, random, false));
         }
+        all.addAll(adversaries(10, 25, 26, 32, 40));
         compare(all, "qfsign(m)", (m, theirs) -> {
             Inertia inertia = Inertia.of(m, NONE);
             assertEquals(m.rows(), inertia.positive() + inertia.negative() + inertia.zero());

@@ -109,6 +109,76 @@ final class SlowAlgebra {
         return factors;
     }
 
+    /** Invariant factors by the plain algorithm: the least entry clears its row and column, and takes in what it does not divide. */
+    static List<BigInteger> factors(IntegerMatrix matrix) {
+        BigInteger[][] a = big(matrix);
+        int rows = matrix.rows();
+        int columns = matrix.columns();
+        List<BigInteger> factors = new ArrayList<>();
+        for (int t = 0; t < columns; t++) {
+            BigInteger pivot = t < rows ? pivot(a, rows, columns, t) : BigInteger.ZERO;
+            if (!pivot.equals(BigInteger.ONE)) {
+                factors.add(pivot);
+            }
+        }
+        return factors;
+    }
+
+    private static BigInteger pivot(BigInteger[][] a, int rows, int columns, int t) {
+        while (true) {
+            int row = -1;
+            int column = -1;
+            for (int i = t; i < rows; i++) {
+                for (int j = t; j < columns; j++) {
+                    if (a[i][j].signum() != 0 && (row < 0 || a[i][j].abs().compareTo(a[row][column].abs()) < 0)) {
+                        row = i;
+                        column = j;
+                    }
+                }
+            }
+            if (row < 0) {
+                return BigInteger.ZERO;
+            }
+            BigInteger[] r = a[row];
+            a[row] = a[t];
+            a[t] = r;
+            for (BigInteger[] line : a) {
+                BigInteger v = line[column];
+                line[column] = line[t];
+                line[t] = v;
+            }
+            BigInteger d = a[t][t];
+            boolean clear = true;
+            for (int i = t + 1; i < rows; i++) {
+                BigInteger q = a[i][t].divide(d);
+                for (int j = t; j < columns; j++) {
+                    a[i][j] = a[i][j].subtract(q.multiply(a[t][j]));
+                }
+                clear &= a[i][t].signum() == 0;
+            }
+            for (int j = t + 1; j < columns; j++) {
+                BigInteger q = a[t][j].divide(d);
+                for (int i = t; i < rows; i++) {
+                    a[i][j] = a[i][j].subtract(q.multiply(a[i][t]));
+                }
+                clear &= a[t][j].signum() == 0;
+            }
+            for (int i = t + 1; i < rows && clear; i++) {
+                for (int j = t + 1; j < columns && clear; j++) {
+                    if (a[i][j].remainder(d).signum() != 0) {
+                        for (int k = t; k < columns; k++) {
+                            a[t][k] = a[t][k].add(a[i][k]);
+                        }
+                        clear = false;
+                    }
+                }
+            }
+            if (clear) {
+                return d.abs();
+            }
+        }
+    }
+
     private static List<int[]> subsets(int n, int order) {
         List<int[]> all = new ArrayList<>();
         for (int bits = 0; bits < 1 << n; bits++) {

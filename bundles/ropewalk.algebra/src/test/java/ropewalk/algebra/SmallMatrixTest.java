@@ -1,5 +1,6 @@
 package ropewalk.algebra;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -118,6 +119,45 @@ class SmallMatrixTest {
                 factors.add(BigInteger.valueOf(out[k]));
             }
             assertEquals(SlowAlgebra.factorsByMinors(m), factors, () -> "seed " + SEED + ", " + m);
+        }
+    }
+
+    /** ((±1, x), (y, 0)) has the factor xy, which wraps around if the limits of the entries are too wide. */
+    @Test
+    void factorsAreRightOrRefusedWhereTheProductOverflows() {
+        Random random = new Random(SEED);
+        int right = 0;
+        int refused = 0;
+        for (int c = 0; c < CASES; c++) {
+            long x = (1L << random.nextInt(45)) - random.nextInt(2);
+            long y = (1L << random.nextInt(45)) + random.nextInt(2);
+            int sign = random.nextBoolean() ? 1 : -1;
+            long[] out = new long[2];
+            int count = SmallMatrix.invariantFactors(new long[] {sign, x, y, 0}, 2, 2, out);
+            BigInteger expected = BigInteger.valueOf(x).multiply(BigInteger.valueOf(y));
+            if (count < 0) {
+                refused++;
+            } else {
+                assertEquals(expected, count == 0 ? BigInteger.ONE : BigInteger.valueOf(out[0]), x + ", " + y);
+                right++;
+            }
+        }
+        assertTrue(refused > CASES / 10 && right > CASES / 10, "refused " + refused + ", right " + right);
+    }
+
+    /** Orthogonal rows of length s√2 and unit rows: products of minors are 4 s⁴, from 2^57 to 2^70. */
+    @Test
+    void numeratorsAtTheLimit() {
+        for (long s = 20_000; s < 150_000; s += 97) {
+            long[] a = {s, s, 0, 0, s, -s, 0, 0, 0, 0, 0, 1, 0, 0, 1, 0};
+            long value = SmallMatrix.determinant(a.clone(), 4);
+            long expected = 2 * s * s;
+            assertTrue(value == expected || value == SmallMatrix.TOO_LARGE, s + ": " + value);
+            assertEquals(4.0 * s * s * s * s < 0x1p61 * (1 - 1e-6), value != SmallMatrix.TOO_LARGE, s + " is just in or out of reach");
+            long[] result = new long[4];
+            if (SmallMatrix.symmetric(a.clone(), 4, result)) {
+                assertArrayEquals(new long[] {expected, 0, 2, 2}, result, "s = " + s);
+            }
         }
     }
 

@@ -130,7 +130,7 @@ final class Compiler {
     private int targets(int s) {
         int at = recording.start(s) + pivotPlaces(s);
         int m = in[at];
-        return recording.kind(s) == Recording.GENERAL ? m * in[at + 1] : m * (m + 1) / 2;
+        return recording.kind(s) == Recording.GENERAL ? Math.multiplyExact(m, in[at + 1]) : Recording.pairs(m);
     }
 
     private void header(int[] order, int from, int to) {

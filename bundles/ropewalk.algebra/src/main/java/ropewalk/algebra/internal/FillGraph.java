@@ -81,7 +81,9 @@ final class FillGraph {
         if ((places & 0xffff) == 0) {
             Memory.check(places, 32, "filled places");
         }
-        return places++;
+        int place = places;
+        places = Math.incrementExact(places);
+        return place;
     }
 
     /** How many neighbours the edge (v, w) has. */

@@ -22,9 +22,10 @@ import ropewalk.algebra.IntegerMatrix;
  * themselves are of at most 2^40 positive numbers: 1 + 2^-10 covers their rounding and the factors 1 + 4u.
  *
  * <p><b>Underflow.</b> A bound of 2^60 or more certifies nothing here, and no more does a pivot d below 2^-200 or a block with
- * |b| below 2^-150. So all values stay below 2^114 and all factors below 2^550, and an underflow, 2^-1074 at most, multiplied by
- * a value or by a value and a factor of order 1 pivots, below 2^314, stays below 2^-600. 2^-500 is added for all of them.
- * Overflow makes the bound infinite or NaN, which certifies nothing either.
+ * |b| below 2^-150. So all values stay below 2^114, as u times each of them is in the bound, the factors l below 2^315 and
+ * the factors w below 2^550. An underflow is off by 2^-1074 at most. In l it is multiplied by d and a factor, in w it is part of
+ * the residual, in a residual it is multiplied by a factor w, in products and sums it stays: below 2^-520 each time, and 2^-400
+ * is added for fewer than 2^100 of them. Overflow makes the bound infinite or NaN, which certifies nothing either.
  *
  * <p>The blocks taken have |a d| &lt;= b²/2, so one eigenvalue is positive and one negative. By Sylvester's law A + shift·I + E
  * has the inertia of D, and by H. Weyl (1912) no eigenvalue of A + shift·I differs by more than the norm of E from its own.
@@ -35,6 +36,10 @@ final class FloatingInertia {
     private static final double LARGEST = 0x1p60;
     private static final double LEAST_PIVOT = 0x1p-200;
     private static final double LEAST_SQUARE = 0x1p-300;
+    /** For all underflows together; see above. */
+    static final double UNDERFLOW = 0x1p-400;
+    /** A vertex that waited until its threshold fell below has no pivot worth having. */
+    private static final double LEAST_THRESHOLD = 0x1p-60;
 
     private final FillGraph graph;
     private final Queue queue;
@@ -45,6 +50,7 @@ final class FloatingInertia {
     private int positive;
     private int negative;
     private double residue;
+    private boolean hopeless;
 
     private int[] others = new int[16];
     private int[] first = new int[16];
@@ -83,6 +89,10 @@ final class FloatingInertia {
         }
         for (int key = queue.leastKey(), v = queue.first(key); v >= 0; key = queue.leastKey(), v = queue.first(key)) {
             checkpoint.run();
+            if (hopeless) {
+                residue = Double.POSITIVE_INFINITY;
+                return;
+            }
             queue.remove(v);
             step(v, key);
         }
@@ -90,7 +100,7 @@ final class FloatingInertia {
             // Math.max keeps NaN, which then compares as not below any limit.
             residue = Math.max(residue, rowError);
         }
-        residue = residue < LARGEST ? residue * (1 + 0x1p-10) + 0x1p-500 : Double.POSITIVE_INFINITY;
+        residue = residue < LARGEST ? residue * (1 + 0x1p-10) + UNDERFLOW : Double.POSITIVE_INFINITY;
     }
 
     int positive() {
@@ -122,7 +132,10 @@ final class FloatingInertia {
         if (!tryBlock(v)) {
             // Waits for its neighbours, and is less choosy the next time, so that its turn comes.
             threshold[v] /= 2;
-            queue.put(v, key + key / 2 + 1);
+            if (!(threshold[v] >= LEAST_THRESHOLD)) {
+                hopeless = true;
+            }
+            queue.put(v, Math.min(key + key / 2 + 1, 2 * graph.n));
         }
     }
 

@@ -3,14 +3,13 @@ package ropewalk.algebra.internal;
 import java.math.BigInteger;
 import java.util.Arrays;
 import ropewalk.algebra.IntegerMatrix;
-import ropewalk.algebra.MatrixTooLargeException;
 
 /**
  * Sparse Gaussian elimination of any matrix over a residue ring, the pivots chosen as it goes by the count of H. M. Markowitz
  * (Manag. Sci. 3 (1957) 255–269): few entries in the pivot's row and column, and a unit of the ring.
  *
- * <p>Places are numbered: entry k of the matrix is number k, fill gets the next numbers. A place that was once filled stays,
- * also where its value cancels, so that the steps told to the listener are right modulo every prime and over the rationals,
+ * <p>Places are those of {@link FillLines}. A place that was once filled stays, also where its value cancels, and every step
+ * is told in full, zeros included, so that the steps told to the listener are right modulo every prime and over the rationals,
  * as long as no pivot vanishes. The elimination ends when no unit is left; over a field all values left are 0 then.
  */
 final class GeneralElimination {
@@ -29,24 +28,15 @@ final class GeneralElimination {
     }
 
     private static final int CANDIDATES = 4;
-    private static final long LARGEST_REST = 4_000_000;
 
     private final PlaceValues values;
     private final Listener listener;
     private final Runnable checkpoint;
-    private final int[][] rowColumn;
-    private final int[][] rowPlace;
-    private final int[] rowLength;
+    private final FillLines lines;
     private final int[] rowCount;
-    private final int[][] columnRow;
-    private final int[][] columnPlace;
-    private final int[] columnLength;
     private final int[] columnCount;
-    private final boolean[] rowDone;
-    private final boolean[] columnDone;
     private final Queue rowQueue;
     private final Queue columnQueue;
-    private int places;
 
     private final int[] pivotRows;
     private final int[] pivotColumns;
@@ -69,66 +59,30 @@ final class GeneralElimination {
         this.values = values;
         this.listener = listener;
         this.checkpoint = checkpoint;
-        int rows = matrix.rows();
-        int columns = matrix.columns();
-        rowColumn = new int[rows][];
-        rowPlace = new int[rows][];
-        rowLength = new int[rows];
-        columnRow = new int[columns][];
-        columnPlace = new int[columns][];
-        columnLength = new int[columns];
-        rowDone = new boolean[rows];
-        columnDone = new boolean[columns];
-        places = matrix.entries();
-        fill(matrix);
-        rowCount = rowLength.clone();
-        columnCount = columnLength.clone();
-        rowQueue = new Queue(rows);
-        columnQueue = new Queue(columns);
-        pivotRows = new int[Math.min(rows, columns)];
+        lines = new FillLines(matrix);
+        rowCount = lines.rowLength.clone();
+        columnCount = lines.columnCount;
+        rowQueue = new Queue(matrix.rows());
+        columnQueue = new Queue(matrix.columns());
+        pivotRows = new int[Math.min(matrix.rows(), matrix.columns())];
         pivotColumns = new int[pivotRows.length];
-        placeInRow = new int[columns];
-        stamp = new int[columns];
+        placeInRow = new int[matrix.columns()];
+        stamp = new int[matrix.columns()];
         Arrays.fill(stamp, -1);
-    }
-
-    private void fill(IntegerMatrix matrix) {
-        for (int k = 0; k < places; k++) {
-            columnLength[matrix.column(k)]++;
-        }
-        for (int j = 0; j < columnRow.length; j++) {
-            columnRow[j] = new int[columnLength[j]];
-            columnPlace[j] = new int[columnLength[j]];
-        }
-        Arrays.fill(columnLength, 0);
-        for (int i = 0; i < rowColumn.length; i++) {
-            int from = matrix.rowStart(i);
-            int length = matrix.rowStart(i + 1) - from;
-            rowLength[i] = length;
-            rowColumn[i] = new int[length];
-            rowPlace[i] = new int[length];
-            for (int k = 0; k < length; k++) {
-                int j = matrix.column(from + k);
-                rowColumn[i][k] = j;
-                rowPlace[i][k] = from + k;
-                columnRow[j][columnLength[j]] = i;
-                columnPlace[j][columnLength[j]++] = from + k;
-            }
-        }
     }
 
     /** Eliminates as long as a unit is left. */
     void run() {
-        for (int i = 0; i < rowColumn.length; i++) {
+        for (int i = 0; i < rowCount.length; i++) {
             offerRow(i);
         }
-        for (int j = 0; j < columnRow.length; j++) {
+        for (int j = 0; j < columnCount.length; j++) {
             offerColumn(j);
         }
         while (choose()) {
             checkpoint.run();
             if (values.confirm(bestPlace)) {
-                eliminate(bestRow, bestColumn);
+                eliminate(bestRow, bestColumn, bestPlace);
             }
         }
     }
@@ -146,49 +100,17 @@ final class GeneralElimination {
     }
 
     int places() {
-        return places;
+        return lines.places();
     }
 
     /** The places outside all pivot rows and columns. */
     int[] rest() {
-        IntList rest = new IntList(16);
-        for (int i = 0; i < rowColumn.length; i++) {
-            for (int k = 0; k < rowLength[i] && !rowDone[i]; k++) {
-                if (!columnDone[rowColumn[i][k]]) {
-                    rest.add(rowPlace[i][k]);
-                }
-            }
-        }
-        return rest.toArray();
+        return lines.rest();
     }
 
     /** The values outside all pivot rows and columns as a dense matrix, without lines that are empty. */
     BigInteger[][] rest(ResidueValues residues) {
-        int[] newColumn = new int[columnRow.length];
-        int columns = 0;
-        int rows = 0;
-        for (int j = 0; j < newColumn.length; j++) {
-            newColumn[j] = columnDone[j] || columnCount[j] == 0 ? -1 : columns++;
-        }
-        for (int i = 0; i < rowColumn.length; i++) {
-            rows += rowDone[i] || rowLength[i] == 0 ? 0 : 1;
-        }
-        if ((long) rows * columns > LARGEST_REST) {
-            throw new MatrixTooLargeException("the elimination by units leaves a dense " + rows + " x " + columns
-                + " part, more than " + LARGEST_REST + " numbers; split the matrix into blocks");
-        }
-        BigInteger[][] rest = new BigInteger[rows][columns];
-        for (int i = 0, to = 0; i < rowColumn.length; i++) {
-            if (rowDone[i] || rowLength[i] == 0) {
-                continue;
-            }
-            Arrays.fill(rest[to], BigInteger.ZERO);
-            for (int k = 0; k < rowLength[i]; k++) {
-                rest[to][newColumn[rowColumn[i][k]]] = residues.get(rowPlace[i][k]);
-            }
-            to++;
-        }
-        return rest;
+        return lines.rest(residues);
     }
 
     private void offerRow(int i) {
@@ -240,28 +162,32 @@ final class GeneralElimination {
     }
 
     private boolean lookAtColumn(int j) {
-        if (columnLength[j] > 2 * columnCount[j]) {
-            columnLength[j] = compactColumn(j, columnLength[j]);
+        if (lines.columnLength[j] > 2 * columnCount[j]) {
+            lines.compactColumn(j);
         }
+        int[] rows = lines.columnRow[j];
+        int[] places = lines.columnPlace[j];
         boolean found = false;
-        for (int k = 0; k < columnLength[j]; k++) {
-            int i = columnRow[j][k];
+        for (int k = 0; k < lines.columnLength[j]; k++) {
+            int i = rows[k];
             // The test may be dear: not asked where the answer would not matter.
-            if (!rowDone[i] && (!found || cost(i, j) < bestCost) && values.isPivot(columnPlace[j][k])) {
+            if (!lines.rowDone[i] && (!found || cost(i, j) < bestCost) && values.isPivot(places[k])) {
                 found = true;
-                consider(i, j, columnPlace[j][k]);
+                consider(i, j, places[k]);
             }
         }
         return found;
     }
 
     private boolean lookAtRow(int i) {
+        int[] columns = lines.rowColumn[i];
+        int[] places = lines.rowPlace[i];
         boolean found = false;
-        for (int k = 0; k < rowLength[i]; k++) {
-            int j = rowColumn[i][k];
-            if (!columnDone[j] && (!found || cost(i, j) < bestCost) && values.isPivot(rowPlace[i][k])) {
+        for (int k = 0; k < lines.rowLength[i]; k++) {
+            int j = columns[k];
+            if (!lines.columnDone[j] && (!found || cost(i, j) < bestCost) && values.isPivot(places[k])) {
                 found = true;
-                consider(i, j, rowPlace[i][k]);
+                consider(i, j, places[k]);
             }
         }
         return found;
@@ -281,16 +207,17 @@ final class GeneralElimination {
         }
     }
 
-    private void eliminate(int row, int column) {
+    private void eliminate(int row, int column, int pivot) {
         int l = collectRow(row, column);
-        int pivot = besideColumn[l];
-        rowDone[row] = true;
-        int m = collectColumn(column);
-        columnDone[column] = true;
+        int m = collectColumn(row, column);
+        lines.dropRow(row);
+        lines.dropColumn(column);
         rowQueue.remove(row);
         columnQueue.remove(column);
-        if ((long) m * l > targets.length) {
-            targets = new int[Math.multiplyExact(m, l) * 3 / 2 + 1];
+        long changes = (long) m * l;
+        if (changes > targets.length) {
+            Memory.check(changes, Integer.BYTES, "changes of one step");
+            targets = new int[Math.toIntExact(Math.max(changes, Math.min(changes * 3 / 2, Integer.MAX_VALUE - 8)))];
         }
         if (m > 0 && l > 0) {
             values.startStep(pivot);
@@ -300,7 +227,6 @@ final class GeneralElimination {
             change(belowRow[k], below[k], l, k * l);
         }
         for (int c = 0; c < l; c++) {
-            columnCount[besideColumn[c]]--;
             offerColumn(besideColumn[c]);
         }
         for (int k = 0; k < m; k++) {
@@ -313,50 +239,39 @@ final class GeneralElimination {
         }
     }
 
-    /** The live places of the pivot row without the pivot; its own place is left at the end of {@link #besideColumn}. */
+    /** The live places of the pivot row without the pivot. */
     private int collectRow(int row, int column) {
-        int length = rowLength[row];
+        int length = lines.rowLength[row];
         if (length > beside.length) {
             beside = new int[2 * length];
-        }
-        if (length >= besideColumn.length) {
             besideColumn = new int[2 * length];
         }
         int l = 0;
-        int pivot = -1;
         for (int k = 0; k < length; k++) {
-            int j = rowColumn[row][k];
-            if (j == column) {
-                pivot = rowPlace[row][k];
-            } else if (!columnDone[j]) {
-                beside[l] = rowPlace[row][k];
+            int j = lines.rowColumn[row][k];
+            if (j != column && !lines.columnDone[j]) {
+                beside[l] = lines.rowPlace[row][k];
                 besideColumn[l++] = j;
             }
         }
-        besideColumn[l] = pivot;
-        rowColumn[row] = null;
-        rowPlace[row] = null;
-        rowLength[row] = 0;
         return l;
     }
 
-    private int collectColumn(int column) {
-        int length = columnLength[column];
+    /** The live places of the pivot column without the pivot. */
+    private int collectColumn(int row, int column) {
+        int length = lines.columnLength[column];
         if (length > below.length) {
             below = new int[2 * length];
             belowRow = new int[2 * length];
         }
         int m = 0;
         for (int k = 0; k < length; k++) {
-            int i = columnRow[column][k];
-            if (!rowDone[i]) {
-                below[m] = columnPlace[column][k];
+            int i = lines.columnRow[column][k];
+            if (i != row && !lines.rowDone[i]) {
+                below[m] = lines.columnPlace[column][k];
                 belowRow[m++] = i;
             }
         }
-        columnRow[column] = null;
-        columnPlace[column] = null;
-        columnLength[column] = 0;
         return m;
     }
 
@@ -365,75 +280,28 @@ final class GeneralElimination {
         if (l > 0) {
             values.startRow(factorPlace);
         }
-        int[] columns = rowColumn[row];
-        int[] rowPlaces = rowPlace[row];
-        int length = 0;
-        for (int k = 0; k < rowLength[row]; k++) {
-            int j = columns[k];
-            if (!columnDone[j]) {
-                columns[length] = j;
-                rowPlaces[length++] = rowPlaces[k];
-                stamp[j] = row;
-                placeInRow[j] = rowPlaces[k];
-            }
+        lines.compactRow(row);
+        for (int k = 0; k < lines.rowLength[row]; k++) {
+            int j = lines.rowColumn[row][k];
+            stamp[j] = row;
+            placeInRow[j] = lines.rowPlace[row][k];
         }
-        rowLength[row] = length;
         for (int c = 0; c < l; c++) {
             int j = besideColumn[c];
             int place = stamp[j] == row ? placeInRow[j] : newPlace(row, j);
             targets[targetsFrom + c] = place;
             values.add(place, beside[c]);
         }
-        rowCount[row] = rowLength[row];
+        rowCount[row] = lines.rowLength[row];
         // A row may be changed again before another one overwrites the stamps: they must not outlive this call.
-        for (int k = 0; k < rowLength[row]; k++) {
-            stamp[rowColumn[row][k]] = -1;
+        for (int k = 0; k < lines.rowLength[row]; k++) {
+            stamp[lines.rowColumn[row][k]] = -1;
         }
     }
 
     private int newPlace(int row, int column) {
-        if ((places & 0xffff) == 0) {
-            Memory.check(places, 40, "filled places");
-        }
-        int place = places++;
-        values.room(places);
-        int length = rowLength[row]++;
-        if (length == rowColumn[row].length) {
-            rowColumn[row] = Arrays.copyOf(rowColumn[row], 2 * length + 4);
-            rowPlace[row] = Arrays.copyOf(rowPlace[row], 2 * length + 4);
-        }
-        rowColumn[row][length] = column;
-        rowPlace[row][length] = place;
-        addToColumn(row, column, place);
+        int place = lines.newPlace(row, column);
+        values.room(lines.places());
         return place;
-    }
-
-    private void addToColumn(int row, int column, int place) {
-        int length = columnLength[column];
-        if (length == columnRow[column].length) {
-            length = compactColumn(column, length);
-        }
-        columnRow[column][length] = row;
-        columnPlace[column][length] = place;
-        columnLength[column] = length + 1;
-        columnCount[column]++;
-    }
-
-    /** Drops the rows that are done from a full column, and makes room where that frees little. */
-    private int compactColumn(int column, int length) {
-        int[] rows = columnRow[column];
-        int[] columnPlaces = columnPlace[column];
-        int kept = 0;
-        for (int k = 0; k < length; k++) {
-            if (!rowDone[rows[k]]) {
-                rows[kept] = rows[k];
-                columnPlaces[kept++] = columnPlaces[k];
-            }
-        }
-        if (2 * kept >= rows.length) {
-            columnRow[column] = Arrays.copyOf(rows, 2 * kept + 4);
-            columnPlace[column] = Arrays.copyOf(columnPlaces, 2 * kept + 4);
-        }
-        return kept;
     }
 }

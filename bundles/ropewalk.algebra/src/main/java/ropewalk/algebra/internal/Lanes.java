@@ -4,20 +4,44 @@ package ropewalk.algebra.internal;
  * Arithmetic modulo several primes at once, one prime a lane, residues in doubles.
  *
  * <p><b>Why it is exact.</b> Let 2^49 &lt; p &lt; 2^50, u = 2^-53, all residues whole and at most p in absolute value. h = fl(ab)
- * and l = fma(a, b, -h) give ab = h + l exactly, |l| &lt;= 2^46. The quotient q, rounded to a whole number by adding and
- * taking away 3·2^51, comes from fl(fl(h - t)·fl(1/p)), whose error is at most 3.01 u (p + 1) &lt; 0.38; so |q - (h - t)/p|
- * &lt; 0.88. Then fma(q, p, -h) is a whole number below 0.88 p + p &lt; 2^51, hence exact, the two additions as well, and the
- * result t - ab + qp is at most 0.88 p + 2^46 &lt; p: again a residue. Zero is 0, p or -p. (T. J. Dekker, Numer. Math. 18
- * (1971) 224–242, for exact products; IEEE 754-2008 for fma.)
+ * and l = fma(a, b, -h) give ab = h + l exactly, and |l| is at most half a unit in the last place of p²: at most 2^45 &lt; 0.07 p
+ * for p² &lt; 2^99, else at most 2^46 &lt; 0.09 p. The quotient q, rounded to a whole number by adding and taking away 3·2^51 (the
+ * sum lies between 2^52 and 2^53, where doubles are the whole numbers), comes from fl(fl(h - t)·fl(1/p)), three roundings, whose
+ * error is at most 3.01 u (p + 1) &lt; 0.38; so |q - (h - t)/p| &lt; 0.88. h is whole, for doubles above 2^53 are and smaller products
+ * are exact. Then fma(q, p, -h) is a whole number below 0.88 p + p &lt; 2^51, hence exact, the two additions as well, and the
+ * result t - ab + qp is below 0.88 p + 0.09 p &lt; p: again a residue. Zero is 0, p or -p. No exponent comes near its limits.
+ * (T. J. Dekker, Numer. Math. 18 (1971) 224–242, for exact products; IEEE 754-2008 for fma.)
  *
  * <p>All loops index every array by the same variable: that is the form which the just-in-time compiler turns into vector
  * instructions. On a processor without a fused instruction {@link Math#fma(double, double, double)} is exact but slow;
- * there the same loops run on long arithmetic.
+ * there the same steps run on long arithmetic. Which of the two is taken is a matter of time only: both give the same residue
+ * classes, possibly by other representatives, and nothing but the class leaves by {@link #canonical} and {@link #isZero}.
  */
 final class Lanes {
     private static final double ROUND = 0x1.8p52;
-    private static final boolean FUSED = fusedInHardware();
 
+    /** Two exact ways to the same residue classes. */
+    enum Arithmetic {
+        /** Doubles with a fused multiplication and addition. */
+        FUSED,
+        /** Longs that wrap around, with a quotient from doubles. */
+        LONG;
+
+        /** The one that was faster when the class was loaded; no value depends on it. */
+        static final Arithmetic FASTER = fusedInHardware() ? FUSED : LONG;
+
+        /** Without the instruction the method takes a microsecond or more by way of decimal numbers. */
+        private static boolean fusedInHardware() {
+            double x = 1;
+            long start = System.nanoTime();
+            for (int k = 0; k < 2000; k++) {
+                x = Math.fma(x, 0.999, 0.001);
+            }
+            return System.nanoTime() - start < 1_000_000 && x > 0;
+        }
+    }
+
+    private final boolean fused;
     private final long[] primes;
     private final double[] p;
     private final double[] reciprocal;
@@ -25,7 +49,23 @@ final class Lanes {
     private final double[] base;
 
     Lanes(long[] primes) {
+        this(primes, Arithmetic.FASTER);
+    }
+
+    /**
+     * Lanes with a given arithmetic.
+     *
+     * @param primes odd numbers between 2^49 and 2^50
+     * @throws IllegalArgumentException if one is not, for which nothing would be proved
+     */
+    Lanes(long[] primes, Arithmetic arithmetic) {
+        this.fused = arithmetic == Arithmetic.FUSED;
         this.primes = primes;
+        for (long prime : primes) {
+            if (prime <= 1L << 49 || prime >= 1L << 50) {
+                throw new IllegalArgumentException("prime " + prime + " is not between 2^49 and 2^50, where the arithmetic is proved");
+            }
+        }
         int lanes = primes.length;
         p = new double[lanes];
         reciprocal = new double[lanes];
@@ -40,16 +80,6 @@ final class Lanes {
         }
     }
 
-    /** Without the instruction the method takes a microsecond or more by way of decimal numbers. */
-    private static boolean fusedInHardware() {
-        double x = 1;
-        long start = System.nanoTime();
-        for (int k = 0; k < 2000; k++) {
-            x = Math.fma(x, 0.999, 0.001);
-        }
-        return System.nanoTime() - start < 1_000_000 && x > 0;
-    }
-
     int count() {
         return primes.length;
     }
@@ -60,7 +90,7 @@ final class Lanes {
 
     /** t becomes t - a b. */
     void subtractProduct(double[] t, double[] a, double[] b) {
-        if (FUSED) {
+        if (fused) {
             subtractProduct(t, a, b, p, reciprocal);
         } else {
             for (int k = 0; k < t.length; k++) {
@@ -80,7 +110,7 @@ final class Lanes {
 
     /** t becomes a b; t may be a or b. */
     void multiply(double[] t, double[] a, double[] b) {
-        if (FUSED) {
+        if (fused) {
             multiply(t, a, b, p, reciprocal);
         } else {
             for (int k = 0; k < t.length; k++) {
@@ -98,6 +128,7 @@ final class Lanes {
         }
     }
 
+    /** t - ab with a quotient off by less than 1.4 (three roundings as above, then truncation): all but ab and qp fits, and those wrap. */
     private double slow(double a, double b, double t, int k) {
         long q = (long) (a * b * reciprocal[k]);
         return ((long) t - ((long) a * (long) b - q * primes[k])) % primes[k];

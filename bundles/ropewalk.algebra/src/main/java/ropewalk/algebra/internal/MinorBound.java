@@ -6,9 +6,11 @@ import ropewalk.algebra.IntegerMatrix;
  * Upper bounds, as binary logarithms, for determinants and minors.
  *
  * <p>Hadamard (1893): |det A| is at most the product of the lengths of the rows, or of the columns. Lengths are summed in
- * floating point from positive numbers, so each square is off by at most a factor (1 + 2^-53)^(n + 2), and each logarithm by
- * one unit in the last place of a number below 2^8; for up to 2^31 entries a line this is below 2^-21 a line, and the
- * rounding of the sum of up to 2^25 logarithms is below 2^-21 a line as well: 2^-20 a line is added.
+ * floating point from positive numbers, so each square is off by at most a factor (1 + 2^-53)^(n + 3), and each logarithm, below
+ * 2^8, by less than 2^-40; for up to 2^31 entries a line this is below 2^-21 a line. No logarithm is negative, so the
+ * partial sums ascend, also as computed; where they reach 2^32 {@link PrimeBudget#forBits} refuses the number, else an addition
+ * is off by at most 2^-53 2^32 = 2^-21. Together 2^-20 a line, which is added. (A line without entries has the logarithm
+ * negative infinity: the determinant is 0.)
  */
 final class MinorBound {
     private static final double LINE_MARGIN = 0x1p-20;

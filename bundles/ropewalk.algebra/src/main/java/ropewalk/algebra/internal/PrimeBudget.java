@@ -8,9 +8,10 @@ final class PrimeBudget {
     private static final int LANES = 32;
     /** A processor's vector holds eight doubles at most: other numbers of lanes waste the end. */
     private static final int STEP = 8;
-    /** Every prime used is at least 2^49.99, checked where it is used. */
+    /** Every prime used is at least this, checked where it is used: more than 10^11 primes are. */
+    private static final long LEAST_PRIME = (1L << 50) - (1L << 42);
+    /** Below log2 of the least prime, 50 + log2(1 - 2^-8) &gt; 49.994, by far more than the rounding of the count. */
     private static final double BITS_A_PRIME = 49.99;
-    private static final long LEAST_PRIME = (long) Math.ceil(Math.pow(2, BITS_A_PRIME)) + 1;
 
     private final Elimination elimination;
     private final Runnable checkpoint;
@@ -48,8 +49,9 @@ final class PrimeBudget {
         int laneCount = lanes();
         ProgramRun run = new ProgramRun(elimination.program(), laneCount, checkpoint);
         boolean checkRest = elimination.program().rest > 0;
-        // Each pivot is a quotient of minors, and a minor has fewer prime divisors of this size than primes are needed.
-        long mostSkipped = 1000 + 2L * (elimination.rank() + 1) * (primes.length + 1);
+        // A pivot is 0 modulo a prime only if that divides one of the r leading minors. A row of less than 2^31 numbers of 64 bits is
+        // shorter than 2^79, so by Hadamard a minor of order k has fewer than 2k prime divisors of this size: r(r + 1) in all.
+        long mostSkipped = (elimination.rank() + 1L) * (elimination.rank() + 1L);
         for (int next = 0; good < primes.length; next += laneCount) {
             if (next - good > mostSkipped) {
                 throw new IllegalStateException("of " + next + " primes only " + good + " left all pivots standing");

@@ -39,7 +39,7 @@ final class Recording implements GeneralElimination.Listener, SymmetricEliminati
         code.add(pivot);
         code.add(m);
         append(beside, m);
-        append(targets, m * (m + 1) / 2);
+        append(targets, pairs(m));
     }
 
     @Override
@@ -51,7 +51,12 @@ final class Recording implements GeneralElimination.Listener, SymmetricEliminati
         code.add(m);
         append(besideA, m);
         append(besideD, m);
-        append(targets, m * (m + 1) / 2);
+        append(targets, pairs(m));
+    }
+
+    /** The pairs (i, j) with i &lt;= j of m things; an ArithmeticException rather than a wrong number where no int holds it. */
+    static int pairs(int m) {
+        return Math.toIntExact(m * (m + 1L) / 2);
     }
 
     private void begin(int kind) {

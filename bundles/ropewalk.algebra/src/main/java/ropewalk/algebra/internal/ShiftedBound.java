@@ -15,7 +15,13 @@ import ropewalk.algebra.IntegerMatrix;
  * 3.6): complex sums are right to a factor 1 + ε, |ε| &lt;= u = 2^-53, products to 3u. The inverse r of a pivot d is right to 5u,
  * so l = fl(x r) has |l d - x| &lt;= 9u |x|, and the update t' = fl(t - fl(l x_j)) adds at most u |t'| + 3u |l x_j| + |l| 9u |x_j|
  * to E(i, j); 13u |l| |x_j| covers the second-order terms. Moduli are replaced by sums of absolute values, which are larger.
- * Underflow and the rounding of the sums: as in {@link FloatingInertia}, the same limits being kept. No pivoting: the imaginary
+ * The sums are of at most 2^40 positive numbers: 1 + 2^-10 covers their rounding.
+ *
+ * <p><b>Underflow and overflow.</b> η is at most δ/2 &lt;= 2^51, and u times every value is in it: values stay below 2^105. Pivots are
+ * refused below 2^-150, so r is below 2^151 and l below 2^257. An underflow, 2^-1074 at most, is multiplied by two values and a
+ * factor at most: 2^-400 is more than all of them together. Where a value overflows or is NaN, so does η.
+ *
+ * <p>No pivoting: the imaginary
  * part of every Schur complement of M is at least δ, so no pivot of the exact elimination is below δ; if the computed ones lose
  * too much by growth, η says so, and the bound is refused.
  */
@@ -101,7 +107,7 @@ final class ShiftedBound implements MinimumDegree.Sweep {
         for (double rowError : error) {
             eta = Math.max(eta, rowError);
         }
-        eta = eta * (1 + 0x1p-10) + 0x1p-500;
+        eta = eta * (1 + 0x1p-10) + FloatingInertia.UNDERFLOW;
         if (refused || !(eta <= delta / 2) || Double.isNaN(bits)) {
             return Double.POSITIVE_INFINITY;
         }

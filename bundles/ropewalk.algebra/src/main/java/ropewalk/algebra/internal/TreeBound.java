@@ -11,12 +11,18 @@ import ropewalk.algebra.IntegerMatrix;
  * weight -A(i, j) for i &ne; j and an edge from i to the ground with weight the sum of row i. det A is the sum over the spanning
  * trees of the products of their weights. So |det A| is at most the same sum for the absolute values of the weights.
  *
- * <p><b>Rounding.</b> That sum is the product of the pivots when the vertices are eliminated one by one, where a pivot is the
+ * The weights may have any signs and the diagonal any values: the first sentence defines them from A, which must be symmetric.
+ *
+ * <p><b>Rounding.</b> That sum T is the product of the pivots when the vertices are eliminated one by one, where a pivot is the
  * sum of the weights at the vertex, never a difference (W. K. Grassmann, M. I. Taksar and D. P. Heyman, Oper. Res. 33 (1985)
- * 1107–1116). Only positive numbers are added, multiplied and divided, so after N operations in all every number is right
- * to a factor (1 - u)^-N, u = 2^-53, and the product of n pivots to (1 - u)^-nN; n N 2^-52 is added to the logarithm, which
- * is more than n N u / ln 2. (Where n N exceeds 2^56 the bound is refused.) A weight that would fall below 2^-900 is
- * raised to that, which can only enlarge the sum and keeps clear of underflow; above 2^900 the bound is refused. For the
+ * 1107–1116). Let F be the product of the pivots so far, as computed, times the tree sum, taken exactly, of the graph that is
+ * left with the weights as computed; at the start F is T, at the end the product of the computed pivots. Only positive numbers are
+ * added, multiplied and divided. So a step at a vertex with m neighbours has its pivot right to m factors 1 + ε, |ε| &lt;= u = 2^-53,
+ * and each new weight to m + 3 more; the tree sum of n' vertices is homogeneous of degree n' in the weights with positive
+ * coefficients, so F changes by at most m + (m + 3) n' factors, n' &lt; n: fewer than n·3m(m + 2), and none for m = 0. The weights at
+ * the start are right to one factor each, which makes n. N = n (n + entries + Σ 3m(m + 2)) factors in all take at most N u / ln 2 (1 + 2^-50) from
+ * the logarithm, and N 2^-52 is added. (Where N exceeds 2^56 the bound is refused.) A weight that would fall below 2^-900 is
+ * raised to that, which can only enlarge F and keeps clear of underflow; above 2^900 the bound is refused. For the
  * logarithms see {@link MinorBound#logarithmMargin}.
  */
 final class TreeBound implements MinimumDegree.Sweep {

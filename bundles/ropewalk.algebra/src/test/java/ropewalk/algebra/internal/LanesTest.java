@@ -1,11 +1,17 @@
 package ropewalk.algebra.internal;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.math.BigInteger;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
+import ropewalk.algebra.Adversaries;
+import ropewalk.algebra.IntegerMatrix;
 
 class LanesTest {
     private static final long SEED = 99;
@@ -20,10 +26,27 @@ class LanesTest {
         };
     }
 
-    @Test
-    void productsAndDifferencesAreExact() {
+    /** Near both ends of the range where the arithmetic is proved, and where p² passes a power of two. */
+    private static long[] primes() {
+        long[] primes = java.util.Arrays.copyOf(Primes.range(0, 4), 16);
+        BigInteger end = BigInteger.ONE.shiftLeft(49);
+        BigInteger middle = BigInteger.ONE.shiftLeft(99).sqrt();
+        for (int k = 4; k < 8; k++) {
+            primes[k] = (end = end.nextProbablePrime()).longValueExact();
+            primes[k + 4] = (middle = middle.nextProbablePrime()).longValueExact();
+        }
+        middle = BigInteger.ONE.shiftLeft(99).sqrt().subtract(BigInteger.valueOf(1000));
+        for (int k = 12; k < 16; k++) {
+            primes[k] = (middle = middle.nextProbablePrime()).longValueExact();
+        }
+        return primes;
+    }
+
+    @ParameterizedTest
+    @EnumSource(Lanes.Arithmetic.class)
+    void productsAndDifferencesAreExact(Lanes.Arithmetic arithmetic) {
         Random random = new Random(SEED);
-        Lanes lanes = new Lanes(Primes.range(0, 16));
+        Lanes lanes = new Lanes(primes(), arithmetic);
         double[] a = new double[16];
         double[] b = new double[16];
         double[] t = new double[16];
@@ -50,9 +73,37 @@ class LanesTest {
     }
 
     @Test
-    void inversesInvert() {
+    void primesOutsideTheProofAreRefused() {
+        for (long p : new long[] {3, 1L << 49, (1L << 50) + 1}) {
+            assertThrows(IllegalArgumentException.class, () -> new Lanes(new long[] {p}));
+        }
+    }
+
+    /** A whole program gives the same residues with both: no result can depend on which one was faster. */
+    @Test
+    void programsAgree() {
         Random random = new Random(SEED);
-        Lanes lanes = new Lanes(Primes.range(5, 13));
+        for (int c = 0; c < 300; c++) {
+            IntegerMatrix m = Adversaries.square(c % Adversaries.KINDS, 1 + random.nextInt(20), random);
+            Elimination elimination = Elimination.record(m, m.isSymmetric(), Adversaries.PRIMES[c % 3], () -> { });
+            ProgramRun fused = new ProgramRun(elimination.program(), 8, () -> { });
+            ProgramRun longs = new ProgramRun(elimination.program(), 8, () -> { });
+            for (int from = 0; from < 24; from += 8) {
+                fused.run(new Lanes(Primes.range(from, from + 8), Lanes.Arithmetic.FUSED));
+                longs.run(new Lanes(Primes.range(from, from + 8), Lanes.Arithmetic.LONG));
+                for (int lane = 0; lane < 8; lane++) {
+                    assertEquals(fused.product(lane), longs.product(lane), () -> "seed " + SEED + ", " + m);
+                }
+                assertArrayEquals(fused.restIsZero(), longs.restIsZero(), () -> "seed " + SEED + ", " + m);
+            }
+        }
+    }
+
+    @ParameterizedTest
+    @EnumSource(Lanes.Arithmetic.class)
+    void inversesInvert(Lanes.Arithmetic arithmetic) {
+        Random random = new Random(SEED);
+        Lanes lanes = new Lanes(Primes.range(5, 13), arithmetic);
         double[] a = new double[8];
         double[] inverse = new double[8];
         for (int c = 0; c < 500; c++) {

@@ -7,13 +7,14 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.math.BigInteger;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
+import ropewalk.algebra.Adversaries;
 import ropewalk.algebra.IntegerMatrix;
 
 /** The number of primes: enough by the bound, and not one more than needed where the bound is met. */
 class PrimeCountTest {
     private static final long SEED = 42;
 
-    /** Sylvester's matrices (1867) have entries ±1 and meet Hadamard's bound: |det| = n^(n/2). */
+    /** Sylvester's matrices (1867; recalled) have entries ±1 and meet Hadamard's bound: |det| = n^(n/2). */
     private static IntegerMatrix sylvester(int n) {
         long[] a = new long[n * n];
         for (int i = 0; i < n; i++) {
@@ -109,6 +110,30 @@ class PrimeCountTest {
         }
     }
 
+    /** Each bound by itself, against values from many more primes than Hadamard's bound asks for. */
+    @Test
+    void boundsHoldForAdversaries() {
+        Random random = new Random(SEED);
+        int sharp = 0;
+        for (int c = 0; c < 60 * (Adversaries.KINDS - 10); c++) {
+            int n = 1 + random.nextInt(c % 10 == 0 ? 40 : 12);
+            IntegerMatrix m = Adversaries.square(10 + c % (Adversaries.KINDS - 10), n, random);
+            BigInteger value = ModularDeterminant.withPrimes(m, 3 + n * 66 / 49).abs();
+            TreeBound tree = new TreeBound(m);
+            ShiftedBound shifted = new ShiftedBound(m);
+            MinimumDegree.run(m, () -> { }, tree, shifted);
+            int shift = Math.max(0, value.bitLength() - 80);
+            double least = value.signum() == 0 ? Double.NEGATIVE_INFINITY
+                : shift + Math.log(value.shiftRight(shift).doubleValue()) / Math.log(2);
+            double general = MinorBound.ofDeterminant(m, false, () -> { });
+            for (double bits : new double[] {tree.bits(), shifted.bits(), general, MinorBound.ofDeterminant(m, true, () -> { })}) {
+                assertTrue(bits >= least - 1e-11 * Math.abs(least), () -> "seed " + SEED + ", bound 2^" + bits + ", value " + value + ", " + m);
+                sharp += bits < least + 0.01 ? 1 : 0;
+            }
+        }
+        assertTrue(sharp > 20, "only " + sharp + " bounds were nearly met: the test is blunt");
+    }
+
     /** |det (A + iδ)| is close to |det A| where no eigenvalue is near 0, and never below. */
     @Test
     void shiftedBoundIsCloseForWellConditionedMatrices() {
@@ -131,7 +156,7 @@ class PrimeCountTest {
         }
     }
 
-    /** Cayley (1889): the complete graph has n^(n-2) spanning trees; here the bound is the value. */
+    /** Cayley (1889; recalled): the complete graph has n^(n-2) spanning trees; here the bound is the value. */
     @Test
     void treeBoundIsSharpForLaplacians() {
         for (int n : new int[] {3, 5, 10, 40}) {

@@ -14,6 +14,6 @@ public final class DeterminantMethodComponent implements Method<IntegerValue> {
 
     @Override
     public Outcome<IntegerValue> measure(LinkDiagram link, Effort effort) {
-        return new Outcome.Exact<>(GoeritzElimination.determinant(link, effort));
+        return WithinMemory.measure(() -> GoeritzElimination.determinant(link, effort));
     }
 }

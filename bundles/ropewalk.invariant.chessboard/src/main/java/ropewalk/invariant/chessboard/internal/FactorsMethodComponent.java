@@ -23,16 +23,20 @@ public final class FactorsMethodComponent implements Method<IntegerList> {
 
     @Override
     public Outcome<IntegerList> measure(LinkDiagram link, Effort effort) {
+        return WithinMemory.measure(() -> factors(link, effort));
+    }
+
+    private static IntegerList factors(LinkDiagram link, Effort effort) {
         GoeritzForms forms = GoeritzForms.of(link);
         int pieces = ConnectedPieces.of(link).count();
         if (pieces == 1 && forms.count() == 1) {
-            return new Outcome.Exact<>(new IntegerList(ofPiece(forms, 0, effort)));
+            return new IntegerList(ofPiece(forms, 0, effort));
         }
         List<BigInteger> cyclic = new ArrayList<>();
         for (int p = 0; p < forms.count(); p++) {
             cyclic.addAll(ofPiece(forms, p, effort));
         }
-        return new Outcome.Exact<>(new IntegerList(DirectSum.of(cyclic, pieces - 1, effort::checkpoint)));
+        return new IntegerList(DirectSum.of(cyclic, pieces - 1, effort::checkpoint));
     }
 
     private static List<BigInteger> ofPiece(GoeritzForms forms, int piece, Effort effort) {

@@ -14,6 +14,6 @@ public final class NullityMethodComponent implements Method<IntegerValue> {
 
     @Override
     public Outcome<IntegerValue> measure(LinkDiagram link, Effort effort) {
-        return new Outcome.Exact<>(IntegerValue.of(GoeritzElimination.nullity(link, effort)));
+        return WithinMemory.measure(() -> IntegerValue.of(GoeritzElimination.nullity(link, effort)));
     }
 }

@@ -14,6 +14,6 @@ public final class SignatureMethodComponent implements Method<IntegerValue> {
 
     @Override
     public Outcome<IntegerValue> measure(LinkDiagram link, Effort effort) {
-        return new Outcome.Exact<>(IntegerValue.of(GoeritzElimination.signature(link, effort)));
+        return WithinMemory.measure(() -> IntegerValue.of(GoeritzElimination.signature(link, effort)));
     }
 }

@@ -23,7 +23,7 @@ public final class ColouringDeterminantComponent implements Method<IntegerValue>
 
     @Override
     public Outcome<IntegerValue> measure(LinkDiagram link, Effort effort) {
-        return new Outcome.Exact<>(determinant(ColouringMatrix.of(link), effort));
+        return WithinMemory.measure(() -> determinant(ColouringMatrix.of(link), effort));
     }
 
     private static IntegerValue determinant(ColouringMatrix matrix, Effort effort) {

@@ -14,6 +14,6 @@ public final class Fox7MethodComponent implements Method<IntegerValue> {
 
     @Override
     public Outcome<IntegerValue> measure(LinkDiagram link, Effort effort) {
-        return new Outcome.Exact<>(new IntegerValue(FoxColourings.count(link, 7, effort::checkpoint)));
+        return WithinMemory.measure(() -> new IntegerValue(FoxColourings.count(link, 7, effort::checkpoint)));
     }
 }
