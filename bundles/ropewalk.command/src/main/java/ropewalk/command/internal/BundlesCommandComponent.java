@@ -71,17 +71,22 @@ public final class BundlesCommandComponent extends Subcommand {
         int width = bundles.stream().mapToInt(b -> b.getSymbolicName().length()).max().orElse(0);
         for (Bundle bundle : bundles) {
             String guest = bundle.getLocation().startsWith("guest:") ? "  guest" : "";
-            System.out.println(padded(bundle.getSymbolicName(), width) + "  " + padded(bundle.getVersion().toString(), 12)
+            System.out.println(padded(bundle.getSymbolicName(), width) + "  " + padded(bundle.getVersion().toString(), 18)
                     + state(bundle) + guest);
         }
         System.out.println();
         int ids = catalogue.entries().stream().mapToInt(e -> e.id().length()).max().orElse(0);
         for (CatalogueEntry entry : catalogue.entries()) {
-            System.out.println(padded(entry.id(), ids + 1) + entry.definition().map(d -> d.title()).orElse("(not defined)"));
+            System.out.println(padded(entry.id(), ids + 1) + title(entry));
             for (RankedMethod method : entry.methods()) {
                 System.out.println("    " + padded(method.id(), 28) + method.origin());
             }
         }
+    }
+
+    private static String title(CatalogueEntry entry) {
+        return entry.definition().map(d -> d.title() + (d.needsOrientation() ? " (of the oriented link)" : ""))
+                .orElse("(not defined)");
     }
 
     private static String state(Bundle bundle) {
