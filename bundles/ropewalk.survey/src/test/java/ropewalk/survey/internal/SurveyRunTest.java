@@ -17,6 +17,9 @@ import java.util.concurrent.atomic.AtomicInteger;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import ropewalk.invariant.Outcome;
+import ropewalk.split.Partition;
+import ropewalk.split.SplitDetection;
+import ropewalk.split.Verdict;
 import ropewalk.survey.Survey.RequestException;
 import ropewalk.survey.SurveyListener;
 import ropewalk.survey.SurveyReport;
@@ -260,5 +263,24 @@ class SurveyRunTest {
         assertEquals(report.links(), rows.size() - 1);
         assertTrue(report.links() < 9000);
         assertTrue(rows.get(rows.size() - 1).matches("t\\d+,braid,[12],\\d+,\\d+,n\\d+"), rows.get(rows.size() - 1));
+    }
+
+    @Test
+    void aVerdictThatHangsCostsThatLinkAlone() throws Exception {
+        FakeCatalogue catalogue = new FakeCatalogue().with("size", (link, effort) -> exactly(link.crossings()));
+        SplitDetection detection = (link, effort) -> {
+            if (link.crossings() == 3) {
+                sleepForGood();
+            }
+            return new Verdict(Partition.whole(link.components()), Partition.whole(link.components()), List.of(),
+                    List.of("nothing"), "");
+        };
+        SurveyReport report = new SurveyRun(request(1, 0.1, List.of(), false, twists("v.csv", 5)), catalogue, detection,
+                listener).run();
+        List<String> verdicts = rows(report).stream().skip(1).map(row -> row.split(",", -1)[5]).toList();
+        assertEquals(List.of("not split", "not split", "!effort: the verdict did not stop at its effort", "not split",
+                "not split"), verdicts);
+        assertEquals(1, report.failedCells());
+        assertEquals(1, messages.stream().filter(m -> m.contains("a verdict did not stop")).count());
     }
 }
