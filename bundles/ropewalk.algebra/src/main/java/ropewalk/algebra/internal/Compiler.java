@@ -12,10 +12,12 @@ final class Compiler {
     private final int[] slotOf;
     private final IntList free = new IntList(256);
     private final IntList out;
+    private final Runnable checkpoint;
     private int slots;
 
-    private Compiler(Recording recording, int places) {
+    private Compiler(Recording recording, int places, Runnable checkpoint) {
         this.recording = recording;
+        this.checkpoint = checkpoint;
         this.in = recording.code();
         this.out = new IntList(in.length + in.length / 4);
         this.slotOf = new int[places];
@@ -29,9 +31,10 @@ final class Compiler {
      * @param places the number of places
      * @param initial the values of the first places
      * @param rest the places left at the end
+     * @param checkpoint called now and then
      */
-    static Program compile(Recording recording, int places, long[] initial, int[] rest) {
-        return new Compiler(recording, places).compile(places, initial, rest);
+    static Program compile(Recording recording, int places, long[] initial, int[] rest, Runnable checkpoint) {
+        return new Compiler(recording, places, checkpoint).compile(places, initial, rest);
     }
 
     private Program compile(int places, long[] initial, int[] rest) {
@@ -47,6 +50,7 @@ final class Compiler {
             header(order, from, to);
             for (int k = from; k < to; k++) {
                 body(order[k]);
+                pause(k);
             }
         }
         int[] code = out.toArray();
@@ -63,6 +67,7 @@ final class Compiler {
         int[] level = new int[recording.steps()];
         int[] changed = new int[places];
         for (int s = 0; s < level.length; s++) {
+            pause(s);
             int targetsFrom = targetsFrom(s);
             int mine = 0;
             for (int k = recording.start(s); k < recording.start(s) + pivotPlaces(s); k++) {
@@ -85,6 +90,7 @@ final class Compiler {
         Arrays.fill(reader, Integer.MAX_VALUE);
         int[] parent = new int[recording.steps()];
         for (int s = parent.length - 1; s >= 0; s--) {
+            pause(s);
             int first = Integer.MAX_VALUE;
             int targetsFrom = targetsFrom(s);
             for (int k = targetsFrom; k < targetsFrom + targets(s); k++) {
@@ -99,6 +105,12 @@ final class Compiler {
             }
         }
         return parent;
+    }
+
+    private void pause(int step) {
+        if ((step & 63) == 0) {
+            checkpoint.run();
+        }
     }
 
     private int[] weights() {

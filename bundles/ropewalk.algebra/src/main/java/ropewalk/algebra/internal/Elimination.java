@@ -27,7 +27,7 @@ final class Elimination {
             int[] used = run.used();
             int[] rest = run.rest();
             return new Elimination(used, used, rest,
-                () -> Compiler.compile(recording, run.places(), run.initial(), rest));
+                () -> Compiler.compile(recording, run.places(), run.initial(), rest, checkpoint));
         }
         GeneralElimination run = new GeneralElimination(matrix, new PrimeValues(matrix, field), recording, checkpoint);
         run.run();
@@ -38,7 +38,8 @@ final class Elimination {
             columns[k] = run.pivotColumn(k);
         }
         int[] rest = run.rest();
-        return new Elimination(rows, columns, rest, () -> Compiler.compile(recording, run.places(), values(matrix), rest));
+        return new Elimination(rows, columns, rest,
+            () -> Compiler.compile(recording, run.places(), values(matrix), rest, checkpoint));
     }
 
     private static long[] values(IntegerMatrix matrix) {

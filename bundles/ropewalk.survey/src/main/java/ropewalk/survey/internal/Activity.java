@@ -6,6 +6,7 @@ final class Activity {
     /** The method, or {@code verdict}; null while nothing of anybody else's runs. */
     private volatile String task;
     private volatile long cell;
+    private volatile boolean abandoned;
 
     void begin(String newTask) {
         cell++;
@@ -27,5 +28,31 @@ final class Activity {
 
     long cell() {
         return cell;
+    }
+
+    /** Nobody waits for this worker any more. */
+    void abandon() {
+        abandoned = true;
+    }
+
+    boolean isAbandoned() {
+        return abandoned;
+    }
+
+    /** Ends the work of a worker that nobody waits for, before what it found with a cancelled effort is kept. */
+    void requireWanted() {
+        if (abandoned) {
+            throw new AbandonedException();
+        }
+    }
+
+    /** Thrown inside an abandoned worker. */
+    static final class AbandonedException extends RuntimeException {
+
+        private static final long serialVersionUID = 1L;
+
+        AbandonedException() {
+            super("abandoned", null, false, false);
+        }
     }
 }

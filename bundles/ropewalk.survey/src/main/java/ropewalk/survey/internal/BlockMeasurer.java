@@ -20,18 +20,21 @@ final class BlockMeasurer {
     private final RowShape shape;
     private final boolean strict;
     private final ColumnMeasurer measurer;
+    private final Activity activity;
     private final VerdictMeasurer verdicts;
     private final CodeReaders readers = new CodeReaders();
     private final LinkBatch.Builder builder = new LinkBatch.Builder();
     private final EvidenceLines evidence = new EvidenceLines();
     private int failedCells;
 
-    BlockMeasurer(Columns columns, RowShape shape, boolean strict, ColumnMeasurer measurer, VerdictMeasurer verdicts) {
+    BlockMeasurer(Columns columns, RowShape shape, boolean strict, ColumnMeasurer measurer,
+            VerdictMeasurer verdicts, Activity activity) {
         this.columns = columns;
         this.shape = shape;
         this.strict = strict;
         this.measurer = measurer;
         this.verdicts = verdicts;
+        this.activity = activity;
     }
 
     FinishedBlock measure(Job job) {
@@ -79,6 +82,7 @@ final class BlockMeasurer {
             for (int i = 0; i < texts.length; i++) {
                 texts[i] = CellText.of(filled[i]);
             }
+            activity.requireWanted();
             job.finishedCells.put(column.id(), texts);
             return texts;
         }

@@ -16,7 +16,6 @@ final class Worker implements Runnable {
     private final Activity activity;
     private final Effort effort;
     private volatile Job job;
-    private volatile boolean abandoned;
     private volatile Thread thread;
 
     Worker(BlockingQueue<Job> jobs, BlockMeasurer blocks, ColumnMeasurer columns,
@@ -33,24 +32,25 @@ final class Worker implements Runnable {
     public void run() {
         thread = Thread.currentThread();
         try {
-            while (!abandoned) {
+            while (!activity.isAbandoned()) {
                 Job next = jobs.take();
                 if (next == END) {
                     return;
                 }
                 job = next;
                 FinishedBlock finished = blocks.measure(next);
-                if (!abandoned) {
-                    next.finished.complete(finished);
-                }
+                activity.requireWanted();
+                next.finished.complete(finished);
                 job = null;
             }
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
+        } catch (Activity.AbandonedException e) {
+            // Another worker has the job.
         } catch (Throwable e) {
             // Ours, not a method's: let the survey end with it.
             Job broken = job;
-            if (broken != null && !abandoned) {
+            if (broken != null && !activity.isAbandoned()) {
                 broken.finished.completeExceptionally(e);
             }
         }
@@ -58,7 +58,7 @@ final class Worker implements Runnable {
 
     /** Takes the job away from this worker for good, with what the hanging method has said so far. */
     Job abandon(String task) {
-        abandoned = true;
+        activity.abandon();
         effort.cancel();
         Job orphan = job;
         if (orphan == null) {

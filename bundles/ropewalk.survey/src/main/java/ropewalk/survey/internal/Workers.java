@@ -73,7 +73,7 @@ final class Workers {
         ColumnMeasurer measurer = new ColumnMeasurer(catalogue, benches, activity, effort);
         VerdictMeasurer verdicts = columns.hasVerdict()
                 ? new VerdictMeasurer(detection, activity, effort) : null;
-        Worker worker = new Worker(jobs, new BlockMeasurer(columns, shape, request.strict(), measurer, verdicts), measurer,
+        Worker worker = new Worker(jobs, new BlockMeasurer(columns, shape, request.strict(), measurer, verdicts, activity), measurer,
                 verdicts, activity, effort);
         Thread thread = new Thread(worker, "survey worker");
         thread.setDaemon(true);

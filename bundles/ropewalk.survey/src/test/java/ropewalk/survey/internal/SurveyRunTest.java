@@ -16,6 +16,7 @@ import java.util.Optional;
 import java.util.concurrent.atomic.AtomicInteger;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import ropewalk.invariant.Effort;
 import ropewalk.invariant.Outcome;
 import ropewalk.split.Partition;
 import ropewalk.split.SplitDetection;
@@ -139,18 +140,36 @@ class SurveyRunTest {
                 .with("good", (link, effort) -> exactly(link.crossings()))
                 .with("hangs", (link, effort) -> {
                     if (link.crossings() == 3) {
-                        sleepForGood();
+                        waitUntilCancelled(effort);
                     }
                     return exactly(7);
+                })
+                .with("later", (link, effort) -> {
+                    effort.checkpoint();
+                    return exactly(9);
                 });
         SurveyReport report = run(catalogue, request(1, 0.1, List.of(), false, twists("h.csv", 600)));
         List<String> rows = rows(report);
         assertEquals(601, rows.size());
-        assertEquals("t2,braid,2,2,2,7,n2", rows.get(2), "what it had said before is kept");
+        assertEquals("t2,braid,2,2,2,7,9,n2", rows.get(2), "what it had said before is kept");
         assertTrue(rows.get(3).startsWith("t3,braid,1,3,3,!effort: hangs.a hung"), rows.get(3));
         assertTrue(rows.get(600).startsWith("t600,braid,2,600,600,!effort: hangs.a"), rows.get(600));
+        assertTrue(rows.stream().skip(1).allMatch(row -> row.matches(".*,9,n\\d+")), "later columns know nothing of it");
         assertEquals(1, messages.stream().filter(m -> m.contains("'hangs.a' did not stop")).count());
         assertEquals(List.of("hangs.a"), catalogue.setAside());
+    }
+
+    /** Takes no notice of its effort until it is abandoned; then it comes back, and its worker goes on. */
+    private static void waitUntilCancelled(Effort effort) {
+        while (true) {
+            try {
+                effort.checkpoint();
+            } catch (Effort.SpentException e) {
+                if (e.getMessage().equals("cancelled")) {
+                    return;
+                }
+            }
+        }
     }
 
     private static void sleepForGood() {
