@@ -6,8 +6,8 @@ import java.util.function.UnaryOperator;
 import org.osgi.annotation.versioning.ConsumerType;
 
 /**
- * The plain parts of an invariant, given once to the constructor: by default neither the mirror image nor the reversal
- * changes the value. A component extends it and adds what is special.
+ * The plain parts of an invariant, given once to the constructor. A component extends it and adds what is special: by
+ * default the orientation does not count, and nothing is claimed of mirror image, reversal or split union.
  *
  * @param <V> the type of the value
  */
@@ -61,12 +61,12 @@ public abstract class InvariantBase<V extends Value> implements Invariant<V> {
 
     @Override
     public Optional<UnaryOperator<V>> underMirrorImage() {
-        return Optional.of(UnaryOperator.identity());
+        return Optional.empty();
     }
 
     @Override
     public Optional<UnaryOperator<V>> underReversal() {
-        return Optional.of(UnaryOperator.identity());
+        return Optional.empty();
     }
 
     @Override

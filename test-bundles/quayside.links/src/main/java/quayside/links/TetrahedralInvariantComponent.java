@@ -1,6 +1,7 @@
 package quayside.links;
 
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import org.osgi.service.component.annotations.Component;
 import ropewalk.invariant.Bipartition;
 import ropewalk.invariant.Invariant;
@@ -44,6 +45,17 @@ public final class TetrahedralInvariantComponent extends InvariantBase<IntegerVa
     @Override
     public boolean needsOrientation() {
         return true;
+    }
+
+    /** Either change turns the quandle into its dual, with ω² for ω, and squaring is an isomorphism between the two. */
+    @Override
+    public Optional<UnaryOperator<IntegerValue>> underMirrorImage() {
+        return Optional.of(UnaryOperator.identity());
+    }
+
+    @Override
+    public Optional<UnaryOperator<IntegerValue>> underReversal() {
+        return Optional.of(UnaryOperator.identity());
     }
 
     @Override

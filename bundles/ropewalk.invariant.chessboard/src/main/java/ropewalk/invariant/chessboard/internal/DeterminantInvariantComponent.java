@@ -1,6 +1,7 @@
 package ropewalk.invariant.chessboard.internal;
 
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import org.osgi.service.component.annotations.Component;
 import ropewalk.invariant.Bipartition;
 import ropewalk.invariant.Invariant;
@@ -29,6 +30,16 @@ public final class DeterminantInvariantComponent extends InvariantBase<IntegerVa
     public DeterminantInvariantComponent() {
         super("determinant", "Determinant", "The absolute value of the determinant of a Goeritz matrix of a connected "
                 + "diagram; 0 where the diagram is disconnected (Goeritz 1933).", IntegerValue.class);
+    }
+
+    @Override
+    public Optional<UnaryOperator<IntegerValue>> underMirrorImage() {
+        return Optional.of(UnaryOperator.identity());
+    }
+
+    @Override
+    public Optional<UnaryOperator<IntegerValue>> underReversal() {
+        return Optional.of(UnaryOperator.identity());
     }
 
     @Override

@@ -4,6 +4,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import org.osgi.service.component.annotations.Component;
 import ropewalk.invariant.Bipartition;
 import ropewalk.invariant.Invariant;
@@ -34,6 +35,16 @@ public final class FactorsInvariantComponent extends InvariantBase<IntegerList> 
         super("factors", "Invariant factors", "The first homology group of the double branched cover, the cokernel of a "
                 + "Goeritz matrix, as a list of invariant factors, ones dropped and zeros last (Seifert 1933).",
                 IntegerList.class);
+    }
+
+    @Override
+    public Optional<UnaryOperator<IntegerList>> underMirrorImage() {
+        return Optional.of(UnaryOperator.identity());
+    }
+
+    @Override
+    public Optional<UnaryOperator<IntegerList>> underReversal() {
+        return Optional.of(UnaryOperator.identity());
     }
 
     @Override

@@ -37,6 +37,11 @@ public final class SignatureInvariantComponent extends InvariantBase<IntegerValu
     }
 
     @Override
+    public Optional<UnaryOperator<IntegerValue>> underReversal() {
+        return Optional.of(UnaryOperator.identity());
+    }
+
+    @Override
     public Optional<SplitLaw<IntegerValue>> splitLaw() {
         return Optional.of(LAW);
     }

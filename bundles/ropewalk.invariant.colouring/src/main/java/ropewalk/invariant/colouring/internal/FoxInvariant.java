@@ -2,6 +2,7 @@ package ropewalk.invariant.colouring.internal;
 
 import java.math.BigInteger;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import ropewalk.invariant.Bipartition;
 import ropewalk.invariant.InvariantBase;
 import ropewalk.invariant.SplitLaw;
@@ -28,6 +29,16 @@ abstract class FoxInvariant extends InvariantBase<IntegerValue> {
                 return whole.value().compareTo(BigInteger.valueOf((long) prime * prime)) >= 0;
             }
         };
+    }
+
+    @Override
+    public Optional<UnaryOperator<IntegerValue>> underMirrorImage() {
+        return Optional.of(UnaryOperator.identity());
+    }
+
+    @Override
+    public Optional<UnaryOperator<IntegerValue>> underReversal() {
+        return Optional.of(UnaryOperator.identity());
     }
 
     @Override

@@ -73,6 +73,11 @@ public final class LinkingInvariantComponent extends InvariantBase<IntegerMatrix
     }
 
     @Override
+    public Optional<UnaryOperator<IntegerMatrixValue>> underReversal() {
+        return Optional.of(UnaryOperator.identity());
+    }
+
+    @Override
     public Optional<SplitLaw<IntegerMatrixValue>> splitLaw() {
         return Optional.of(LAW);
     }
