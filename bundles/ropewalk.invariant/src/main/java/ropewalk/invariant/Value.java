@@ -1,7 +1,7 @@
 package ropewalk.invariant;
 
 import java.math.BigInteger;
-import java.util.Arrays;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 
@@ -109,7 +109,12 @@ public sealed interface Value {
 
         // Keeps a copy.
         public IntegerMatrixValue {
-            rows = rows.stream().map(List::copyOf).toList();
+            // Plain loops: every link of several components has such a value.
+            List<List<BigInteger>> copies = new ArrayList<>(rows.size());
+            for (List<BigInteger> row : rows) {
+                copies.add(List.copyOf(row));
+            }
+            rows = List.copyOf(copies);
             for (List<BigInteger> row : rows) {
                 if (row.size() != rows.get(0).size()) {
                     throw new IllegalArgumentException("rows of " + rows.get(0).size() + " and " + row.size()
@@ -125,8 +130,15 @@ public sealed interface Value {
          * @return the value
          */
         public static IntegerMatrixValue of(long[][] rows) {
-            return new IntegerMatrixValue(Arrays.stream(rows)
-                    .map(row -> Arrays.stream(row).mapToObj(BigInteger::valueOf).toList()).toList());
+            List<List<BigInteger>> lists = new ArrayList<>(rows.length);
+            for (long[] row : rows) {
+                BigInteger[] entries = new BigInteger[row.length];
+                for (int j = 0; j < row.length; j++) {
+                    entries[j] = BigInteger.valueOf(row[j]);
+                }
+                lists.add(List.of(entries));
+            }
+            return new IntegerMatrixValue(lists);
         }
 
         @Override
