@@ -1,17 +1,15 @@
 package ropewalk.invariant.chessboard.internal;
 
 import java.util.Optional;
-import java.util.function.UnaryOperator;
 import org.osgi.service.component.annotations.Component;
 import ropewalk.invariant.Bipartition;
 import ropewalk.invariant.Invariant;
-import ropewalk.invariant.InvariantBase;
 import ropewalk.invariant.SplitLaw;
 import ropewalk.invariant.Value.IntegerValue;
 
 /** Defines the determinant. */
 @Component(service = Invariant.class)
-public final class DeterminantInvariantComponent extends InvariantBase<IntegerValue> {
+public final class DeterminantInvariantComponent extends DoubleCoverInvariant<IntegerValue> {
 
     /** A separating sphere makes a free summand in H₁ of the double branched cover, whose order then counts as 0. */
     private static final SplitLaw<IntegerValue> LAW = new SplitLaw<>() {
@@ -30,16 +28,6 @@ public final class DeterminantInvariantComponent extends InvariantBase<IntegerVa
     public DeterminantInvariantComponent() {
         super("determinant", "Determinant", "The absolute value of the determinant of a Goeritz matrix of a connected "
                 + "diagram; 0 where the diagram is disconnected (Goeritz 1933).", IntegerValue.class);
-    }
-
-    @Override
-    public Optional<UnaryOperator<IntegerValue>> underMirrorImage() {
-        return Optional.of(UnaryOperator.identity());
-    }
-
-    @Override
-    public Optional<UnaryOperator<IntegerValue>> underReversal() {
-        return Optional.of(UnaryOperator.identity());
     }
 
     @Override

@@ -4,17 +4,15 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.UnaryOperator;
 import org.osgi.service.component.annotations.Component;
 import ropewalk.invariant.Bipartition;
 import ropewalk.invariant.Invariant;
-import ropewalk.invariant.InvariantBase;
 import ropewalk.invariant.SplitLaw;
 import ropewalk.invariant.Value.IntegerList;
 
 /** Defines the invariant factors of H₁ of the double branched cover. */
 @Component(service = Invariant.class)
-public final class FactorsInvariantComponent extends InvariantBase<IntegerList> {
+public final class FactorsInvariantComponent extends DoubleCoverInvariant<IntegerList> {
 
     private static final SplitLaw<IntegerList> LAW = new SplitLaw<>() {
         @Override
@@ -35,16 +33,6 @@ public final class FactorsInvariantComponent extends InvariantBase<IntegerList> 
         super("factors", "Invariant factors", "The first homology group of the double branched cover, the cokernel of a "
                 + "Goeritz matrix, as a list of invariant factors, ones dropped and zeros last (Seifert 1933).",
                 IntegerList.class);
-    }
-
-    @Override
-    public Optional<UnaryOperator<IntegerList>> underMirrorImage() {
-        return Optional.of(UnaryOperator.identity());
-    }
-
-    @Override
-    public Optional<UnaryOperator<IntegerList>> underReversal() {
-        return Optional.of(UnaryOperator.identity());
     }
 
     @Override

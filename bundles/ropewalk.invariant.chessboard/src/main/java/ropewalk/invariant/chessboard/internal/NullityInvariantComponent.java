@@ -2,17 +2,15 @@ package ropewalk.invariant.chessboard.internal;
 
 import java.math.BigInteger;
 import java.util.Optional;
-import java.util.function.UnaryOperator;
 import org.osgi.service.component.annotations.Component;
 import ropewalk.invariant.Bipartition;
 import ropewalk.invariant.Invariant;
-import ropewalk.invariant.InvariantBase;
 import ropewalk.invariant.SplitLaw;
 import ropewalk.invariant.Value.IntegerValue;
 
 /** Defines the nullity. */
 @Component(service = Invariant.class)
-public final class NullityInvariantComponent extends InvariantBase<IntegerValue> {
+public final class NullityInvariantComponent extends DoubleCoverInvariant<IntegerValue> {
 
     private static final SplitLaw<IntegerValue> LAW = new SplitLaw<>() {
         @Override
@@ -30,16 +28,6 @@ public final class NullityInvariantComponent extends InvariantBase<IntegerValue>
     public NullityInvariantComponent() {
         super("nullity", "Nullity", "The rank of the first homology group of the double branched cover; 0 for a knot "
                 + "(Murasugi 1965).", IntegerValue.class);
-    }
-
-    @Override
-    public Optional<UnaryOperator<IntegerValue>> underMirrorImage() {
-        return Optional.of(UnaryOperator.identity());
-    }
-
-    @Override
-    public Optional<UnaryOperator<IntegerValue>> underReversal() {
-        return Optional.of(UnaryOperator.identity());
     }
 
     @Override
